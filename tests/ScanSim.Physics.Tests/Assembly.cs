@@ -1,0 +1,3 @@
+using ScanSim.Testing;
+
+[assembly: AssemblyFixture(typeof(ValidationPage))]
