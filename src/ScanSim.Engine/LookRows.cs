@@ -1,0 +1,130 @@
+using ScanSim.Physics;
+using ScanSim.Physics.Detection;
+using ScanSim.Recordings;
+
+namespace ScanSim.Engine;
+
+/// <summary>Turns the looks of a scan into the rows that the looks table keeps, in order of dwell, range cell and target.</summary>
+internal sealed class LookRows(RunSetup setup)
+{
+    private const int NoLook = -1;
+
+    private readonly int[] best = new int[setup.Targets.Length];
+    private readonly double[] pulseSnr = new double[setup.Timeline.Grid.Pulses.Max()];
+    private readonly double radarDb = Decibels.FromRatio(setup.Model.RadarRatioM2);
+
+    public void Add(FoundLook[] looks, ReadOnlySpan<int> order, List<LookRow> rows)
+    {
+        if (setup.Options.Looks == LooksKept.None)
+        {
+            return;
+        }
+
+        var all = setup.Options.Looks == LooksKept.All;
+        if (!all)
+        {
+            FindBest(looks, order);
+        }
+
+        foreach (var index in order)
+        {
+            if (all || best[looks[index].TargetIndex] == index)
+            {
+                rows.Add(RowOf(looks[index]));
+            }
+        }
+    }
+
+    private void FindBest(FoundLook[] looks, ReadOnlySpan<int> order)
+    {
+        Array.Fill(best, NoLook);
+        foreach (var index in order)
+        {
+            ref var leader = ref best[looks[index].TargetIndex];
+            if (leader == NoLook || IsBetter(looks[index], looks[leader]))
+            {
+                leader = index;
+            }
+        }
+    }
+
+    private static bool IsBetter(in FoundLook a, in FoundLook b) =>
+        a.Detected != b.Detected ? a.Detected : a.Look.SnrRatio > b.Look.SnrRatio;
+
+    private LookRow RowOf(in FoundLook found)
+    {
+        var target = setup.Targets[found.TargetIndex];
+        var detector = setup.Detectors[found.Dwell.PrfIndex];
+        ref readonly var look = ref found.Look;
+        var azimuthDb = Decibels.FromRatio(look.AzimuthBeamRatio);
+        var elevationDb = Decibels.FromRatio(look.ElevationBeamRatio);
+        var eclipsingDb = Decibels.FromRatio(look.EclipsingRatio);
+        var spreadingDb = -4 * Decibels.FromRatio(look.RangeM);
+        var perPulse = target.Fluctuation is FluctuationCase.Case2 or FluctuationCase.Case4;
+        return new LookRow
+        {
+            TimeS = found.Dwell.MiddleS,
+            Scan = found.Dwell.Scan,
+            Dwell = found.Dwell.Index,
+            Target = target.Id,
+            RangeM = look.RangeM,
+            AzimuthDeg = look.AzimuthRad * Angles.DegPerRad,
+            ElevationDeg = look.ElevationRad * Angles.DegPerRad,
+            RadialSpeedMps = look.RangeRateMps,
+            BeamAzimuthDeg = found.Dwell.BeamAzimuthRad * Angles.DegPerRad,
+            Pulses = found.Dwell.Pulses,
+            RadarDb = radarDb,
+            RcsDb = target.RcsDb,
+            SpreadingDb = spreadingDb,
+            AzimuthBeamDb = azimuthDb,
+            ElevationBeamDb = elevationDb,
+            EclipsingDb = eclipsingDb,
+            SnrDb = radarDb + target.RcsDb + spreadingDb + azimuthDb + elevationDb + eclipsingDb,
+            Pd = ProbabilityOf(target, detector, found),
+            FluctuationDb = perPulse ? null : Decibels.FromRatio(found.FluctuationRatio),
+            StatisticDb = Decibels.FromRatio(found.Statistic / detector.Threshold),
+            Detected = found.Detected,
+            LostTo = ReasonOf(target, detector, found),
+            TargetsInCell = found.TargetsInCell,
+        };
+    }
+
+    /// <summary>Computed only for looks that are kept; the pulses of unequal SNR are then worked out once more.</summary>
+    private double ProbabilityOf(RunTarget target, Detector detector, in FoundLook found)
+    {
+        var pulses = pulseSnr.AsSpan(0, found.Dwell.Pulses);
+        if (target.Fluctuation is FluctuationCase.Case2 or FluctuationCase.Case4)
+        {
+            setup.Model.TryLook(target.RcsM2, target.Track.At(found.Dwell.MiddleS), found.Dwell, pulses, out _);
+        }
+
+        return detector.Probability(target.Fluctuation, found.Look.SnrRatio, pulses);
+    }
+
+    private static LossReason ReasonOf(RunTarget target, Detector detector, in FoundLook found)
+    {
+        if (found.Detected)
+        {
+            return LossReason.None;
+        }
+
+        ref readonly var look = ref found.Look;
+        var needed = detector.EvenOddsSnrRatio(target.Fluctuation);
+        if (look.SnrRatio >= needed)
+        {
+            return found.TargetsInCell > 1 ? LossReason.SharedCell : LossReason.Fluctuation;
+        }
+
+        if (look.SnrRatio / (look.AzimuthBeamRatio * look.ElevationBeamRatio * look.EclipsingRatio) < needed)
+        {
+            return LossReason.Range;
+        }
+
+        if (look.EclipsingRatio <= look.AzimuthBeamRatio && look.EclipsingRatio <= look.ElevationBeamRatio)
+        {
+            return LossReason.Eclipsing;
+        }
+
+        return look.ElevationBeamRatio < look.AzimuthBeamRatio ? LossReason.ElevationBeam : LossReason.AzimuthBeam;
+    }
+}
