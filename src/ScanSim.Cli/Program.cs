@@ -1,1 +1,3 @@
-return 0;
+using ScanSim.Cli;
+
+return CommandTree.Invoke(args);

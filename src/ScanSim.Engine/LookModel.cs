@@ -102,41 +102,26 @@ public sealed class LookModel
     {
         look = default;
         var sight = SightOf(state);
-        var apparentM = RangeAmbiguity.ApparentRangeM(sight.RangeM, dwell.PriS);
-        if (!sight.AboveHorizon || apparentM > instrumentedRangeM)
+        if (!sight.AboveHorizon || RangeAmbiguity.ApparentRangeM(sight.RangeM, dwell.PriS) > instrumentedRangeM)
         {
             return false;
         }
 
-        var eclipsing = Eclipsing.PowerRatio(sight.RangeM, pulseWidthS, dwell.PriS);
-        var range2 = sight.RangeM * sight.RangeM;
-        var peakSnr = RadarRatioM2 * rcsM2 / (range2 * range2) * eclipsing;
+        var peakSnr = PeakSnrRatio(rcsM2, sight.RangeM, dwell.PriS);
         if (!(peakSnr * dwell.Pulses >= SummedSnrFloorRatio))
         {
             return false;
         }
 
-        var offsetRad = Angles.ToHalfTurns(sight.AzimuthRad - dwell.BeamAzimuthRad);
-        var (azimuthSum, beamSum) = WeighPulses(sight, state, dwell, offsetRad, peakSnr, pulseSnrRatio);
-        if (!(peakSnr * beamSum >= SummedSnrFloorRatio))
-        {
-            return false;
-        }
+        look = LookAt(sight, state, dwell, peakSnr, pulseSnrRatio);
+        return look.SnrRatio * dwell.Pulses >= SummedSnrFloorRatio;
+    }
 
-        look = new Look
-        {
-            RangeM = sight.RangeM,
-            ApparentRangeM = apparentM,
-            AzimuthRad = sight.AzimuthRad,
-            ElevationRad = sight.ElevationRad,
-            RangeRateMps = RangeRateMps(sight, state),
-            OffsetRad = offsetRad,
-            AzimuthBeamRatio = azimuthSum / dwell.Pulses,
-            ElevationBeamRatio = beamSum / azimuthSum,
-            EclipsingRatio = eclipsing,
-            SnrRatio = peakSnr * beamSum / dwell.Pulses,
-        };
-        return true;
+    /// <summary>The terms of a look whether or not it can exist: what <see cref="TryLook"/> gives, without its limits.</summary>
+    public Look LookAt(double rcsM2, in TrackState state, in Dwell dwell, Span<double> pulseSnrRatio)
+    {
+        var sight = SightOf(state);
+        return LookAt(sight, state, dwell, PeakSnrRatio(rcsM2, sight.RangeM, dwell.PriS), pulseSnrRatio);
     }
 
     public double RangeRateMps(in Sight sight, in TrackState state)
@@ -162,6 +147,32 @@ public sealed class LookModel
         var cosElevation = Math.Cos(Math.Min(highestElevationRad, 0.5 * Math.PI));
         var offsetRad = patterns.Azimuth.MaximumOffsetRad(neededRatio);
         return offsetRad >= Math.PI * cosElevation ? Math.PI : offsetRad / cosElevation;
+    }
+
+    /// <summary>SNR per pulse at the peak of the beam, eclipsing included.</summary>
+    private double PeakSnrRatio(double rcsM2, double rangeM, double priS)
+    {
+        var range2 = rangeM * rangeM;
+        return RadarRatioM2 * rcsM2 / (range2 * range2) * Eclipsing.PowerRatio(rangeM, pulseWidthS, priS);
+    }
+
+    private Look LookAt(in Sight sight, in TrackState state, in Dwell dwell, double peakSnr, Span<double> pulseSnrRatio)
+    {
+        var offsetRad = Angles.ToHalfTurns(sight.AzimuthRad - dwell.BeamAzimuthRad);
+        var (azimuthSum, beamSum) = WeighPulses(sight, state, dwell, offsetRad, peakSnr, pulseSnrRatio);
+        return new Look
+        {
+            RangeM = sight.RangeM,
+            ApparentRangeM = RangeAmbiguity.ApparentRangeM(sight.RangeM, dwell.PriS),
+            AzimuthRad = sight.AzimuthRad,
+            ElevationRad = sight.ElevationRad,
+            RangeRateMps = RangeRateMps(sight, state),
+            OffsetRad = offsetRad,
+            AzimuthBeamRatio = azimuthSum / dwell.Pulses,
+            ElevationBeamRatio = beamSum / azimuthSum,
+            EclipsingRatio = Eclipsing.PowerRatio(sight.RangeM, pulseWidthS, dwell.PriS),
+            SnrRatio = peakSnr * beamSum / dwell.Pulses,
+        };
     }
 
     /// <summary>
