@@ -34,4 +34,40 @@ public static class Philox
 
         return new PhiloxBlock(c0, c1, c2, c3);
     }
+
+    /// <summary>The blocks of a counter and of the next one (first word + 1), eight words in order.</summary>
+    /// <remarks>The rounds of the two run side by side, so that the second costs next to nothing: one block waits for its own products.</remarks>
+    internal static void TwoBlocks(uint c0, uint c1, uint c2, uint c3, uint k0, uint k1, Span<uint> words)
+    {
+        uint d0 = c0 + 1;
+        uint d1 = c1;
+        uint d2 = c2;
+        uint d3 = c3;
+        for (int round = 0; round < Rounds; round++)
+        {
+            ulong product0 = (ulong)Multiplier0 * c0;
+            ulong product1 = (ulong)Multiplier1 * c2;
+            ulong product2 = (ulong)Multiplier0 * d0;
+            ulong product3 = (ulong)Multiplier1 * d2;
+            c0 = (uint)(product1 >> 32) ^ c1 ^ k0;
+            d0 = (uint)(product3 >> 32) ^ d1 ^ k0;
+            c1 = (uint)product1;
+            d1 = (uint)product3;
+            c2 = (uint)(product0 >> 32) ^ c3 ^ k1;
+            d2 = (uint)(product2 >> 32) ^ d3 ^ k1;
+            c3 = (uint)product0;
+            d3 = (uint)product2;
+            k0 += Weyl0;
+            k1 += Weyl1;
+        }
+
+        words[7] = d3;
+        words[6] = d2;
+        words[5] = d1;
+        words[4] = d0;
+        words[3] = c3;
+        words[2] = c2;
+        words[1] = c1;
+        words[0] = c0;
+    }
 }
