@@ -44,6 +44,6 @@ internal sealed class RunSetup
 
     public ulong Seed { get; }
 
-    /// <summary>Number of the run within a study; a single run is number 0.</summary>
-    public uint Run => 0;
+    /// <summary>Part of every draw's address.</summary>
+    public uint Run => Options.RunNumber;
 }

@@ -11,6 +11,7 @@ public sealed class RunTally : IRecordingSink
     private readonly Dictionary<string, TargetTally> targets;
     private readonly ImmutableArray<string> ids;
 
+    /// <summary>Begins to count.</summary>
     /// <param name="scenario">Gives the targets and the duration of a scan, which tells two plots of one pass from plots of two.</param>
     /// <param name="next">Where the rows go on to.</param>
     public RunTally(Scenario scenario, IRecordingSink next)

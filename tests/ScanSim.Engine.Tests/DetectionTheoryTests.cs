@@ -9,7 +9,9 @@ namespace ScanSim.Engine.Tests;
 public class DetectionTheoryTests
 {
     private const int Dwells = 100_000;
-    private const double Confidence = 0.999;
+    private const double Pfa = 1e-4;
+
+    private static readonly double Quantile999 = Normal.InvCDF(0, 1, 0.9995);
 
     public static TheoryData<int, int, double> Looks()
     {
@@ -26,40 +28,30 @@ public class DetectionTheoryTests
 
     [Theory]
     [MemberData(nameof(Looks))]
-    public void Share_of_detections_is_the_exact_Pd_inside_the_binomial_interval(int fluctuation, int pulses, double snrDb)
+    public void Share_of_detections_and_moments_of_the_statistic_are_those_of_theory(int fluctuation, int pulses, double snrDb)
     {
-        const double Pfa = 1e-4;
         var snr = Math.Pow(10, snrDb / 10);
-        var scenario = TestScenario.ConstantSnr(pulses, snr, fluctuation, Dwells, Pfa, seed: 99);
-        var looks = CollectingSink.Of(scenario).Looks;
+        var threshold = DetectionThreshold.FromFalseAlarm(pulses, Pfa);
+        var looks = CollectingSink.Of(TestScenario.ConstantSnr(pulses, snr, fluctuation, Dwells, Pfa, seed: 99)).Looks;
         Assert.Equal(Dwells, looks.Count);
-        var pd = DetectionProbability.Detect((FluctuationCase)fluctuation, pulses, snr, DetectionThreshold.FromFalseAlarm(pulses, Pfa));
+        var pd = DetectionProbability.Detect((FluctuationCase)fluctuation, pulses, snr, threshold);
         Assert.InRange(pd, 0.1, 0.99);
+        Assert.All(looks.Take(10), l => Assert.Equal(pd, l.Pd, 2e-6));
+        Assert.All(looks.Take(10), l => Assert.Equal(snrDb, l.SnrDb, 1e-6));
 
         // The normal quantile of both tails together; half a count for the continuity of the binomial.
-        var halfWidth = Normal.InvCDF(0, 1, 0.5 + Confidence / 2) * Math.Sqrt(pd * (1 - pd) / Dwells) + 0.5 / Dwells;
-        var share = looks.Count(l => l.Detected) / (double)Dwells;
         var comparison = new Comparison(
             $"Engine: share of detections over 100,000 dwells, case {fluctuation}, {pulses} pulses",
             "exact Pd of Swerling's cases (docs/physics/detection.md), 99.9 % binomial interval",
-            halfWidth,
+            Quantile999 * Math.Sqrt(pd * (1 - pd) / Dwells) + 0.5 / Dwells,
             0);
-        comparison.Add($"SNR {snrDb} dB, Pfa {Pfa}", pd, share);
+        comparison.Add($"SNR {snrDb} dB, Pfa {Pfa}", pd, looks.Count(l => l.Detected) / (double)Dwells);
         comparison.Conclude();
-        Assert.All(looks.Take(10), l => Assert.Equal(pd, l.Pd, 2e-6));
-        Assert.All(looks.Take(10), l => Assert.Equal(snrDb, l.SnrDb, 1e-6));
+        AssertMoments(fluctuation, pulses, snr, [.. looks.Select(l => threshold * Math.Pow(10, l.StatisticDb / 10))]);
     }
 
-    [Theory]
-    [MemberData(nameof(Looks))]
-    public void Mean_and_variance_of_the_drawn_statistic_are_those_of_theory(int fluctuation, int pulses, double snrDb)
+    private static void AssertMoments(int fluctuation, int pulses, double snr, double[] statistics)
     {
-        const double Pfa = 1e-4;
-        var snr = Math.Pow(10, snrDb / 10);
-        var scenario = TestScenario.ConstantSnr(pulses, snr, fluctuation, Dwells, Pfa, seed: 5);
-        var threshold = DetectionThreshold.FromFalseAlarm(pulses, Pfa);
-        var statistics = CollectingSink.Of(scenario).Looks.Select(l => threshold * Math.Pow(10, l.StatisticDb / 10)).ToArray();
-
         // E z = n(1 + S); Var z = n(1 + 2S) for known signal energy, plus the variance of the drawn energy.
         var mean = pulses * (1 + snr);
         var energyVariance = fluctuation switch
@@ -74,9 +66,8 @@ public class DetectionTheoryTests
         var drawnMean = statistics.Average();
         var drawnVariance = statistics.Sum(z => (z - drawnMean) * (z - drawnMean)) / (Dwells - 1);
         var fourth = statistics.Sum(z => Math.Pow(z - drawnMean, 4)) / Dwells;
-        var z999 = Normal.InvCDF(0, 1, 0.5 + Confidence / 2);
-        Assert.Equal(mean, drawnMean, z999 * Math.Sqrt(variance / Dwells));
-        Assert.Equal(variance, drawnVariance, z999 * Math.Sqrt((fourth - variance * variance) / Dwells));
+        Assert.Equal(mean, drawnMean, Quantile999 * Math.Sqrt(variance / Dwells));
+        Assert.Equal(variance, drawnVariance, Quantile999 * Math.Sqrt((fourth - variance * variance) / Dwells));
     }
 
     [Fact]

@@ -11,7 +11,7 @@ public class DeterminismTests
         var scenario = Busy();
         var one = CollectingSink.Of(scenario, new RunOptions { Threads = 1, Looks = LooksKept.All });
         var eight = CollectingSink.Of(scenario, new RunOptions { Threads = 8, Looks = LooksKept.All });
-        Assert.True(one.Looks.Count > 1000);
+        Assert.True(one.Looks.Count > 300);
         one.AssertSame(eight);
     }
 
@@ -54,7 +54,7 @@ public class DeterminismTests
         Assert.Equal(all.Scans, none.Scans);
         Assert.Empty(none.Looks);
         Assert.All(best.Looks.GroupBy(l => (l.Scan, l.Target)), g => Assert.Single(g));
-        Assert.Subset([.. all.Looks], [.. best.Looks]);
+        Assert.Subset(all.Looks.ToHashSet(), best.Looks.ToHashSet());
         foreach (var group in all.Looks.GroupBy(l => (l.Scan, l.Target)))
         {
             var kept = best.Looks.Single(l => (l.Scan, l.Target) == group.Key);
