@@ -78,15 +78,15 @@ public static class MarcumQ
         var logFirst = IncompleteGamma.LogUpperRegularized(shape, threshold);
         var logScale = logFirst + PoissonTerm.Log(k, energy);
         var step = Math.Exp(PoissonTerm.Log(shape, threshold) - logFirst);
-        double weight = 1, tail = 1, sum = 1, term = 1;
+        double sum = 1, term = 1;
         while (k < peak || term > Negligible * sum)
         {
+            // Weight and tail apart would leave the range of doubles; their product, the term, does not.
             k++;
             shape++;
-            weight *= energy / k;
-            tail += step;
-            step *= threshold / shape;
-            term = weight * tail;
+            var ratio = energy / k;
+            term = ratio * (term + step);
+            step *= ratio * (threshold / shape);
             sum += term;
         }
 
@@ -112,15 +112,14 @@ public static class MarcumQ
         var logFirst = IncompleteGamma.LogLowerRegularized(shape, threshold);
         var logScale = logFirst + PoissonTerm.Log(k, energy);
         var step = Math.Exp(PoissonTerm.Log(shape - 1, threshold) - logFirst);
-        double weight = 1, tail = 1, sum = 1, term = 1;
+        double sum = 1, term = 1;
         while (k > 0 && (k > peak || term > Negligible * sum))
         {
-            weight *= k / energy;
+            var ratio = k / energy;
             k--;
             shape--;
-            tail += step;
-            step *= shape / threshold;
-            term = weight * tail;
+            term = ratio * (term + step);
+            step *= ratio * (shape / threshold);
             sum += term;
         }
 

@@ -4,14 +4,15 @@ namespace ScanSim.Physics.Detection;
 
 /// <summary>Saddle point of M(t)·exp(−t·T)/t on the real axis, and the integral along the parabola of steepest descent through it.</summary>
 /// <remarks>
-/// Each pulse is a sum of exponentials: M(t) = Π (1−t)^(s−1)/(1−c·t)^s, s = 1 (case 2) or 2 (case 4), c its mean. Below T ≈ mean + σ the
-/// negative saddle gives the probability of a miss, above it the positive one gives that of detection, so the result is the smaller
-/// tail with relative accuracy. The trapezoidal rule converges geometrically because both poles next to the saddle lie at least one
-/// width 1/√φ'' away ([TrefethenWeideman2014]); the step of 0.3 widths leaves exp(−2π/0.3) = 8e-10.
+/// Each pulse is a sum of exponentials: M(t) = Π (1−t)^(s−1)/(1−c·t)^s, s = 1 (case 2) or 2 (case 4), c its mean. Below the mean of
+/// the sum the negative saddle gives the probability of a miss, above it the positive one gives that of detection, so the result is the
+/// smaller tail with relative accuracy. The parabola follows the path of steepest descent of M·exp(−tT) alone: bent after the pole at 0
+/// as well, it would run to where M grows when there are many pulses. The trapezoidal rule converges geometrically because the poles next
+/// to the saddle lie at least one width 1/√φ'' away ([TrefethenWeideman2014]); the step of 0.35 widths leaves exp(−2π/0.35) = 2e-8.
 /// </remarks>
 internal readonly ref struct SaddlePoint
 {
-    private const double StepInWidths = 0.3;
+    private const double StepInWidths = 0.35;
     private const double Negligible = 1e-11;
     private const int BlockCap = 400;
 
@@ -24,17 +25,15 @@ internal readonly ref struct SaddlePoint
     {
         this.stages = stages;
         this.threshold = threshold;
-        double sum = 0, squares = 0, greatest = 0;
+        double sum = 0, greatest = 0;
         foreach (var c in means)
         {
             sum += c;
-            squares += c * c;
             greatest = Math.Max(greatest, c);
         }
 
         var mean = stages == 1 ? sum : 2 * sum - means.Length;
-        var variance = stages == 1 ? squares : 2 * squares - means.Length;
-        IsUpperTail = threshold > mean + Math.Sqrt(variance);
+        IsUpperTail = threshold > mean;
         (Location, curvature, bend) = Find(means, mean / means.Length, greatest);
     }
 
@@ -159,18 +158,18 @@ internal readonly ref struct SaddlePoint
                 t = double.IsInfinity(low) ? 2 * t : 0.5 * (low + high);
             }
 
-            var (first, second, third) = Derivatives(means, t);
+            var (first, second, turn) = Derivatives(means, t);
             var move = -first / second;
             if (!(Math.Abs(move) * Math.Sqrt(second) > 0.05))
             {
-                return (t, second, Math.Max(0, third / (6 * second)));
+                return (t, second, turn);
             }
 
             (low, high) = first < 0 ? (t, high) : (low, t);
             t += move;
         }
 
-        return (t, Derivatives(means, t).Second, 0);
+        throw new ArithmeticException($"The saddle point for threshold {threshold:R} did not settle; the last one was {t:R}.");
     }
 
     /// <summary>The saddle of n equal exponentials of mean c: T·c·t² + ((n+1)·c − T)·t − 1 = 0.</summary>
@@ -181,7 +180,7 @@ internal readonly ref struct SaddlePoint
         return IsUpperTail ? 2 / (linear + root) : -(linear + root) / (2 * threshold * mean);
     }
 
-    private (double First, double Second, double Third) Derivatives(ReadOnlySpan<double> means, double t)
+    private (double First, double Second, double Bend) Derivatives(ReadOnlySpan<double> means, double t)
     {
         double first = 0, second = 0, third = 0;
         foreach (var c in means)
@@ -195,9 +194,9 @@ internal readonly ref struct SaddlePoint
         var inverse = 1 / t;
         var noise = (stages - 1) * means.Length;
         var e = 1 / (1 - t);
-        return (
-            stages * first - noise * e - threshold - inverse,
-            stages * second - noise * e * e + inverse * inverse,
-            2 * (stages * third - noise * e * e * e - inverse * inverse * inverse));
+        first = stages * first - noise * e;
+        second = stages * second - noise * e * e;
+        third = 2 * (stages * third - noise * e * e * e);
+        return (first - threshold - inverse, second + inverse * inverse, third / (6 * second));
     }
 }
