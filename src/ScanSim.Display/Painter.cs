@@ -8,8 +8,8 @@ public sealed class Painter(Scene scene)
 {
     private const string Caution = "Planning estimate from models, not proof of performance.";
 
-    /// <summary>Text as outlines, for canvases whose readers may lack our letters (SVG).</summary>
-    public bool TextAsPaths { get; init; }
+    /// <summary>For an SVG canvas: text as outlines, as the reader's system may lack our letters, and plots as circles.</summary>
+    public bool ForSvg { get; init; }
 
     /// <summary>Where each piece of text was set is added here, if given.</summary>
     internal ICollection<DrawnText>? Journal { get; init; }
@@ -20,7 +20,7 @@ public sealed class Painter(Scene scene)
         Check(size, view, timeS);
         canvas.Save();
         canvas.Scale((float)size.Scale);
-        using (var sheet = new Sheet(canvas, Colours.Of(view.Theme), TextAsPaths, Journal))
+        using (var sheet = new Sheet(canvas, Colours.Of(view.Theme), ForSvg, Journal))
         {
             var head = new TimelineHead(sheet, scene, size.Width);
             var layout = PictureLayout.Of(size.Width, size.Height, scene.Targets.Length, head.Height + TimelineView.AxisHeight);
@@ -28,7 +28,7 @@ public sealed class Painter(Scene scene)
             PlanView.Paint(sheet, scene, view, timeS, layout.Plan);
             new SidePanel(sheet, scene, view, timeS, layout.Panel).Paint();
             PaintHeader(sheet, layout.Header);
-            new TimelineView(sheet, scene, timeS, layout.Timeline, head).Paint();
+            new TimelineView(sheet, scene, timeS, layout, head).Paint();
             sheet.Text(Caution, layout.Foot.Left + 16, layout.Foot.Bottom - 7, TextStyle.Small, sheet.Colours.Quiet);
         }
 

@@ -59,7 +59,7 @@ public static class Picture
     private static void Svg(Scene scene, ViewOptions view, double timeS, PictureSize size, Stream into)
     {
         using var canvas = SKSvgCanvas.Create(SKRect.Create(size.WidthPx, size.HeightPx), into);
-        new Painter(scene) { TextAsPaths = true }.Paint(canvas, size, view, timeS);
+        new Painter(scene) { ForSvg = true }.Paint(canvas, size, view, timeS);
     }
 
     private static void Pdf(Scene scene, ViewOptions view, double timeS, PictureSize size, Stream into)

@@ -9,9 +9,9 @@ internal static class Glyphs
     public const float FalsePlotRadius = 4.2f;
     public const float TruthRadius = 5.5f;
 
-    public static void FalsePlot(SKPath into, SKPoint centre)
+    public static void FalsePlot(SKPath into, SKPoint centre, float scale = 1)
     {
-        const float r = FalsePlotRadius;
+        var r = FalsePlotRadius * scale;
         into.MoveTo(centre.X, centre.Y - r);
         into.LineTo(centre.X + r, centre.Y);
         into.LineTo(centre.X, centre.Y + r);
@@ -20,9 +20,9 @@ internal static class Glyphs
     }
 
     /// <summary>A ring with a stroke along the course (east, north); four arcs and no stroke when the radar cannot look at the target.</summary>
-    public static void Truth(SKPath into, SKPoint centre, float eastMps, float northMps, bool inView)
+    public static void Truth(SKPath into, SKPoint centre, float eastMps, float northMps, bool inView, float scale = 1)
     {
-        const float r = TruthRadius;
+        var r = TruthRadius * scale;
         if (!inView)
         {
             var box = new SKRect(centre.X - r, centre.Y - r, centre.X + r, centre.Y + r);
@@ -40,7 +40,7 @@ internal static class Glyphs
         {
             var (ux, uy) = (eastMps / speed, -northMps / speed);
             into.MoveTo(centre.X + ux * r, centre.Y + uy * r);
-            into.LineTo(centre.X + ux * (r + 7), centre.Y + uy * (r + 7));
+            into.LineTo(centre.X + ux * (r + 7 * scale), centre.Y + uy * (r + 7 * scale));
         }
     }
 

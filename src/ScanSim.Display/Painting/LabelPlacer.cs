@@ -6,18 +6,19 @@ namespace ScanSim.Display.Painting;
 /// <summary>Finds places for labels beside their points, one after the other in the order given, so that none covers another.</summary>
 /// <remarks>
 /// Each label tries places around its point, near ones first; a farther one gets a leader line. Never: outside the frame, over another
-/// label, its leader, another target's symbol or an obstacle. Dear but allowed: over plots. A label without a place is left out and counted.
+/// label, its leader, another target's symbol or an obstacle. Dear but allowed: over plots, a leader over symbols. A label without a place is left out and counted.
 /// </remarks>
 internal sealed class LabelPlacer
 {
     private const float SymbolPx = 7;
     private const double CostPerMark = 0.7;
     private const double CostPerStep = 1.0;
-    private static readonly float[] DistancesPx = [9, 20, 34, 50, 68, 90];
+    private static readonly float[] DistancesPx = [9, 20, 34, 50, 68, 90, 120];
 
     private readonly SKRect frame;
     private readonly IReadOnlyList<SKRect> obstacles;
     private readonly MarkCounts marks;
+    private readonly MarkCounts symbols;
     private readonly List<PlacedLabel> placed = [];
     private readonly IReadOnlyList<LabelRequest> requests;
 
@@ -27,6 +28,7 @@ internal sealed class LabelPlacer
         this.frame = frame;
         this.obstacles = obstacles;
         this.marks = new MarkCounts(frame, marks);
+        symbols = new MarkCounts(frame, requests.Select(r => r.Anchor));
     }
 
     public static LabelLayout Place(
@@ -54,7 +56,7 @@ internal sealed class LabelPlacer
                 // East first, then alternating below and above it, west last.
                 var turn = (k + 1) / 2 * (k % 2 == 0 ? -1 : 1);
                 var candidate = Candidate(request, DistancesPx[step], turn * Math.Tau / directions, step > 0);
-                var cost = step * CostPerStep + CostPerMark * marks.In(candidate.Box) + k * 0.01;
+                var cost = step * CostPerStep + CostPerMark * (marks.In(candidate.Box) + SymbolsUnderLeader(candidate)) + k * 0.01;
                 if (cost < bestCost && IsFree(candidate, index))
                 {
                     (best, bestCost) = (candidate, cost);
@@ -76,6 +78,20 @@ internal sealed class LabelPlacer
         var left = end.X - request.Size.Width * (float)(1 - cos) / 2;
         var top = end.Y - request.Size.Height * (float)(1 - sin) / 2;
         return new PlacedLabel(request, SKRect.Create(left, top, request.Size.Width, request.Size.Height), end, hasLeader);
+    }
+
+    private int SymbolsUnderLeader(in PlacedLabel label)
+    {
+        var (from, to) = (label.Request.Anchor, label.LeaderEnd);
+        var length = SKPoint.Distance(from, to);
+        var count = 0;
+        for (var at = 3 * SymbolPx; at < length; at += SymbolPx)
+        {
+            var share = at / length;
+            count += symbols.In(Around(new SKPoint(from.X + share * (to.X - from.X), from.Y + share * (to.Y - from.Y)), SymbolPx / 2));
+        }
+
+        return count;
     }
 
     private bool IsFree(in PlacedLabel candidate, int index)

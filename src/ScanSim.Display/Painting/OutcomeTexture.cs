@@ -5,7 +5,7 @@ namespace ScanSim.Display.Painting;
 /// <summary>How a share of many scans' outcomes fills a column of the timeline: by texture besides colour.</summary>
 internal static class OutcomeTexture
 {
-    /// <summary>Width of a column, in layout units.</summary>
+    /// <summary>Least width of a column, in layout units, in which the textures still differ.</summary>
     public const float ColumnWidth = 4;
 
     /// <summary>Fills a box (a whole number of columns wide or one column) with the outcome's texture.</summary>
@@ -42,17 +42,17 @@ internal static class OutcomeTexture
         switch (outcome)
         {
             case LookOutcome.MissedRange:
-                path.AddRect(new SKRect(box.Left + 1, box.Top, box.Left + 2.5f, box.Bottom));
+                path.AddRect(Bar(box, 1, 2.5f));
                 break;
             case LookOutcome.MissedChance:
                 Checks(path, box);
                 break;
             case LookOutcome.MissedMasked:
-                path.AddRect(new SKRect(box.Left, box.Top, box.Left + 3, box.Bottom));
+                path.AddRect(Bar(box, 0, 3));
                 break;
             case LookOutcome.MissedUnrecorded:
-                path.AddRect(new SKRect(box.Left, box.Top, box.Left + 0.8f, box.Bottom));
-                path.AddRect(new SKRect(box.Left + 2, box.Top, box.Left + 2.8f, box.Bottom));
+                path.AddRect(Bar(box, 0, 0.8f));
+                path.AddRect(Bar(box, 2, 2.8f));
                 break;
             default:
                 path.AddRect(new SKRect(box.Left, box.MidY - 0.75f, box.Right, box.MidY + 0.75f));
@@ -60,13 +60,16 @@ internal static class OutcomeTexture
         }
     }
 
+    private static SKRect Bar(SKRect box, float from, float to) =>
+        new(Math.Min(box.Left + from, box.Right), box.Top, Math.Min(box.Left + to, box.Right), box.Bottom);
+
     private static void Checks(SKPath path, SKRect box)
     {
         var isLeft = true;
         for (var y = box.Top; y < box.Bottom; y += 2)
         {
             var x = isLeft ? box.Left : box.Left + 2;
-            path.AddRect(new SKRect(x, y, x + 2, Math.Min(y + 2, box.Bottom)));
+            path.AddRect(new SKRect(Math.Min(x, box.Right), y, Math.Min(x + 2, box.Right), Math.Min(y + 2, box.Bottom)));
             isLeft = !isLeft;
         }
     }

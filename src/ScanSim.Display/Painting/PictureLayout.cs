@@ -8,6 +8,9 @@ internal sealed record PictureLayout
     public const float HeaderHeight = 42;
     public const float FootHeight = 22;
 
+    /// <summary>Of the picture's height: the plan keeps the larger part.</summary>
+    private const float TimelineShareMost = 0.42f;
+
     /// <summary>Room for one row of the timeline when there is plenty.</summary>
     public const float RowHeightMost = 22;
 
@@ -24,6 +27,12 @@ internal sealed record PictureLayout
 
     public required SKRect Foot { get; init; }
 
+    /// <summary>Height of a row of the timeline.</summary>
+    public required float RowHeight { get; init; }
+
+    /// <summary>Targets with a row; the rest is counted in one row more.</summary>
+    public required int ShownTargets { get; init; }
+
     /// <summary>The parts of a picture of a size; the timeline takes what its rows ask for, up to its share.</summary>
     /// <param name="width">Of the picture.</param>
     /// <param name="height">Of the picture.</param>
@@ -32,10 +41,12 @@ internal sealed record PictureLayout
     public static PictureLayout Of(float width, float height, int targets, float timelineRest)
     {
         var panelWidth = width >= 1100 ? 236f : 204f;
-        var most = 0.42f * height;
-        var timeline = Math.Min(most, timelineRest + Math.Max(1, targets) * RowHeightMost);
+        var room = TimelineShareMost * height - timelineRest;
+        var fitting = (int)(room / RowHeightLeast);
+        var rows = Math.Clamp(targets, 1, fitting);
+        var rowHeight = Math.Clamp(MathF.Floor(room / rows), RowHeightLeast, RowHeightMost);
         var bottom = height - FootHeight;
-        var top = bottom - MathF.Round(timeline);
+        var top = MathF.Round(bottom - timelineRest - rows * rowHeight);
         return new PictureLayout
         {
             Header = new SKRect(0, 0, width, HeaderHeight),
@@ -43,6 +54,8 @@ internal sealed record PictureLayout
             Panel = new SKRect(width - panelWidth, HeaderHeight, width, top),
             Timeline = new SKRect(0, top, width, bottom),
             Foot = new SKRect(0, bottom, width, height),
+            RowHeight = rowHeight,
+            ShownTargets = targets > fitting ? fitting - 1 : targets,
         };
     }
 }

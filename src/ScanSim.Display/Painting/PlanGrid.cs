@@ -6,6 +6,7 @@ namespace ScanSim.Display.Painting;
 internal sealed class PlanGrid
 {
     private const float BearingLabelPx = 14;
+    private const float LeastRingGapPx = 34;
 
     /// <summary>From this radius on there is room for a label every 10 degrees.</summary>
     private const float DenseRadiusPx = 420;
@@ -16,11 +17,14 @@ internal sealed class PlanGrid
     private readonly Sheet sheet;
     private readonly PlanProjection plan;
     private readonly double instrumentedRangeM;
+    private readonly IReadOnlyList<SKRect> taken;
     private readonly List<GridLabel> labels = [];
     private readonly List<double> ringsM = [];
 
-    public PlanGrid(Sheet sheet, PlanProjection plan, double instrumentedRangeM, double shownRangeM, RangeUnit unit)
+    public PlanGrid(
+        Sheet sheet, PlanProjection plan, double instrumentedRangeM, double shownRangeM, RangeUnit unit, IReadOnlyList<SKRect> taken)
     {
+        this.taken = taken;
         this.sheet = sheet;
         this.plan = plan;
         this.instrumentedRangeM = instrumentedRangeM;
@@ -35,11 +39,11 @@ internal sealed class PlanGrid
     /// <summary>Step of the labelled bearings.</summary>
     public int BearingStepDeg => plan.ToPx(instrumentedRangeM) >= DenseRadiusPx ? 10 : 30;
 
-    /// <summary>Four to six rings in the range shown.</summary>
-    public static double RingStepM(double shownRangeM, RangeUnit unit)
+    /// <summary>At most six rings in the range shown, with room between them for their labels.</summary>
+    public static double RingStepM(double shownRangeM, double metresPerPx, RangeUnit unit)
     {
         var metres = RangeText.MetresPerUnit(unit);
-        return NiceStep.AtLeast(shownRangeM / metres / 6) * metres;
+        return NiceStep.AtLeast(Math.Max(shownRangeM / 6, LeastRingGapPx * metresPerPx) / metres) * metres;
     }
 
     public void PaintLines()
@@ -65,14 +69,14 @@ internal sealed class PlanGrid
     {
         foreach (var label in labels)
         {
-            sheet.Rect(label.Box, sheet.Colours.Ground);
+            sheet.Rect(label.Box, sheet.Colours.Ground.WithAlpha(0xB8));
             sheet.Text(label.Text, label.Centre.X, label.Centre.Y + 4, TextStyle.Small, sheet.Colours.GridText, SKTextAlign.Center);
         }
     }
 
     private void LayRings(double shownRangeM, RangeUnit unit)
     {
-        var stepM = RingStepM(shownRangeM, unit);
+        var stepM = RingStepM(shownRangeM, plan.MetresPerPx, unit);
         var (leastM, greatestM) = plan.VisibleRangesM();
         for (var n = Math.Max(1, Math.Ceiling(leastM / stepM)); n * stepM < Math.Min(greatestM, instrumentedRangeM * (1 - 1e-9)); n++)
         {
@@ -129,7 +133,7 @@ internal sealed class PlanGrid
     {
         var half = sheet.Width(text, TextStyle.Small) / 2 + 3;
         var box = new SKRect(centre.X - half, centre.Y - 7, centre.X + half, centre.Y + 7);
-        if (!plan.Area.Contains(box) || labels.Exists(l => l.Box.IntersectsWith(SKRect.Inflate(box, 4, 2))))
+        if (!plan.Area.Contains(box) || taken.Any(t => t.IntersectsWith(box)) || labels.Exists(l => l.Box.IntersectsWith(SKRect.Inflate(box, 4, 2))))
         {
             return false;
         }

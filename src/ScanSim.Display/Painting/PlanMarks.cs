@@ -93,7 +93,7 @@ internal sealed class PlanMarks(Sheet sheet, PlanProjection plan, Scene scene, V
                 all.Add(place);
                 if (plot.Kind == EchoKind.Noise)
                 {
-                    Glyphs.FalsePlot(diamonds, place);
+                    Glyphs.FalsePlot(diamonds, place, plan.SymbolScale);
                 }
                 else
                 {
@@ -105,7 +105,7 @@ internal sealed class PlanMarks(Sheet sheet, PlanProjection plan, Scene scene, V
             sheet.Outline(diamonds, 1.4f, sheet.Colours.FalsePlot.WithAlpha(alpha));
             if (discs.Count > 0)
             {
-                sheet.Discs([.. discs], Glyphs.PlotRadius, sheet.Colours.Plot.WithAlpha(alpha));
+                sheet.Discs([.. discs], Glyphs.PlotRadius * plan.SymbolScale, sheet.Colours.Plot.WithAlpha(alpha));
             }
         }
 
@@ -118,7 +118,7 @@ internal sealed class PlanMarks(Sheet sheet, PlanProjection plan, Scene scene, V
         using var outOfView = new SKPath();
         foreach (var target in targets)
         {
-            Glyphs.Truth(target.IsInView ? inView : outOfView, target.Position, target.EastMps, target.NorthMps, target.IsInView);
+            Glyphs.Truth(target.IsInView ? inView : outOfView, target.Position, target.EastMps, target.NorthMps, target.IsInView, plan.SymbolScale);
         }
 
         sheet.Outline(outOfView, 1.3f, sheet.Colours.Quiet);

@@ -38,6 +38,9 @@ internal sealed class PlanProjection
         return ToPlan(rangeM * sin, rangeM * cos);
     }
 
+    /// <summary>Symbols shrink on a small plan, so that traffic does not become one blot.</summary>
+    public float SymbolScale => Math.Clamp(Math.Min(Area.Width, Area.Height) / 480, 0.72f, 1);
+
     public float ToPx(double lengthM) => (float)(lengthM / MetresPerPx);
 
     /// <summary>Least and greatest distance of the visible area from the site, in metres.</summary>

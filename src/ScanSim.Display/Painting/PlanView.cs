@@ -15,8 +15,8 @@ internal static class PlanView
         sheet.Canvas.Save();
         sheet.Canvas.ClipRect(area);
         var marks = new PlanMarks(sheet, plan, scene, view, timeS);
-        var grid = new PlanGrid(sheet, plan, scene.InstrumentedRangeM, view.RangeM ?? scene.InstrumentedRangeM, view.Unit);
         var furniture = new PlanFurniture(sheet, plan, scene.SiteName, view.Unit);
+        var grid = new PlanGrid(sheet, plan, scene.InstrumentedRangeM, view.RangeM ?? scene.InstrumentedRangeM, view.Unit, [.. furniture.Boxes, CountBox(area)]);
         marks.PaintBlanked();
         grid.PaintLines();
         if (view.ShowTruth)
@@ -24,17 +24,14 @@ internal static class PlanView
             marks.PaintTrails();
         }
 
-        marks.PaintBeam();
         grid.PaintLabels();
+        marks.PaintBeam();
+        var targets = view.ShowTruth ? marks.TargetsNow() : [];
+        marks.PaintTargets(targets);
         var plots = marks.PaintPlots();
-        if (view.ShowTruth)
+        if (view.ShowLabels)
         {
-            var targets = marks.TargetsNow();
-            marks.PaintTargets(targets);
-            if (view.ShowLabels)
-            {
-                PaintLabels(sheet, area, LabelsOf(sheet, area, targets, grid, furniture, plots));
-            }
+            PaintLabels(sheet, area, LabelsOf(sheet, area, targets, grid, furniture, plots));
         }
 
         furniture.Paint();
@@ -48,7 +45,20 @@ internal static class PlanView
             .Select(t => new LabelRequest(t.Target.Id, t.Position, new SKSize(sheet.Width(t.Target.Id, TextStyle.Small) + 4, 14), !t.IsInView))
             .ToList();
         List<SKRect> obstacles = [.. furniture.Boxes, .. grid.Labels.Select(l => l.Box), CountBox(area)];
-        return LabelPlacer.Place(requests, SKRect.Inflate(area, -4, -4), obstacles, plots);
+        var courses = targets.SelectMany(t => CourseMarks(t));
+        return LabelPlacer.Place(requests, SKRect.Inflate(area, -4, -4), obstacles, plots.Concat(courses));
+    }
+
+    /// <summary>Two marks along the course stroke: a label prefers the other sides.</summary>
+    private static IEnumerable<SKPoint> CourseMarks(TargetNow target)
+    {
+        var speed = MathF.Sqrt(target.EastMps * target.EastMps + target.NorthMps * target.NorthMps);
+        if (target.IsInView && speed > 0)
+        {
+            var (ux, uy) = (target.EastMps / speed, -target.NorthMps / speed);
+            yield return new SKPoint(target.Position.X + 9 * ux, target.Position.Y + 9 * uy);
+            yield return new SKPoint(target.Position.X + 12 * ux, target.Position.Y + 12 * uy);
+        }
     }
 
     private static SKRect CountBox(SKRect area) => new(area.Right - 190, area.Bottom - 28, area.Right, area.Bottom);

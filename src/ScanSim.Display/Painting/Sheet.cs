@@ -8,14 +8,14 @@ internal sealed class Sheet : IDisposable
     private readonly SKPaint fill = new() { IsAntialias = true, Style = SKPaintStyle.Fill };
     private readonly SKPaint stroke = new() { IsAntialias = true, Style = SKPaintStyle.Stroke };
     private readonly SKFont[] fonts;
-    private readonly bool textAsPaths;
+    private readonly bool forSvg;
 
-    public Sheet(SKCanvas canvas, Colours colours, bool textAsPaths, ICollection<DrawnText>? journal)
+    public Sheet(SKCanvas canvas, Colours colours, bool forSvg, ICollection<DrawnText>? journal)
     {
         Canvas = canvas;
         Colours = colours;
         Journal = journal;
-        this.textAsPaths = textAsPaths;
+        this.forSvg = forSvg;
         fonts = [.. Enum.GetValues<TextStyle>().Select(NewFont)];
     }
 
@@ -43,7 +43,7 @@ internal sealed class Sheet : IDisposable
         var width = font.MeasureText(text);
         var left = align switch { SKTextAlign.Right => x - width, SKTextAlign.Center => x - width / 2, _ => x };
         fill.Color = colour;
-        if (textAsPaths)
+        if (forSvg)
         {
             using var path = font.GetTextPath(text, new SKPoint(left, baseline));
             Canvas.DrawPath(path, fill);
@@ -123,6 +123,17 @@ internal sealed class Sheet : IDisposable
     /// <summary>Many discs of one colour, each blended by itself.</summary>
     public void Discs(SKPoint[] centres, float radius, SKColor colour)
     {
+        if (forSvg)
+        {
+            // A point is a line of no length there, which some readers leave out in spite of its round ends.
+            foreach (var centre in centres)
+            {
+                Disc(centre, radius, colour);
+            }
+
+            return;
+        }
+
         Stroke(2 * radius, colour);
         stroke.StrokeCap = SKStrokeCap.Round;
         Canvas.DrawPoints(SKPointMode.Points, centres, stroke);

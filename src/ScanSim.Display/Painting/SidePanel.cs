@@ -1,3 +1,4 @@
+using ScanSim.Recordings;
 using SkiaSharp;
 
 namespace ScanSim.Display.Painting;
@@ -24,8 +25,8 @@ internal sealed class SidePanel(Sheet sheet, Scene scene, ViewOptions view, doub
         y += 30;
         var after = sheet.Text(now.ToString("HH:mm:ss"), left, y, TextStyle.Clock, sheet.Colours.Ink);
         sheet.Text("UTC", after + 6, y, TextStyle.Body, sheet.Colours.Quiet);
-        sheet.Text(now.ToString("yyyy-MM-dd"), right, y, TextStyle.Body, sheet.Colours.Quiet, SKTextAlign.Right);
-        y += 10;
+        y += 9;
+        Figure("Date", now.ToString("yyyy-MM-dd"));
     }
 
     private void PaintFigures()
@@ -34,14 +35,23 @@ internal sealed class SidePanel(Sheet sheet, Scene scene, ViewOptions view, doub
         Figure("Since start", $"{timeS:0.0} s");
         var index = ScanIndex();
         Figure("Scan", index < 0 ? "none" : $"{scene.Scans[index].Scan} ({index + 1} of {scene.Scans.Length})");
-        Figure("Beam at", $"{scene.Beam.AzimuthRad(timeS) * degrees:000.0}°");
-        Figure("Beamwidth", $"{scene.BeamwidthRad * degrees:0.0#}°");
+        Figure("Beam, width", $"{scene.Beam.AzimuthRad(timeS) * degrees:000.0}°, {scene.BeamwidthRad * degrees:0.0#}°");
         Figure("Scan period", $"{scene.Beam.PeriodS:0.0##} s");
         Figure("Instrumented to", RangeText.Of(scene.InstrumentedRangeM, view.Unit));
+        Figure("Targets in view", TargetsInView());
+        Figure("Last full scan", index < 1 ? "none" : $"{Plots(scene.Scans[index - 1].Plots)}, {scene.Scans[index - 1].FalsePlots} false");
         y += 8;
         sheet.Line(new SKPoint(left, y), new SKPoint(right, y), 1, sheet.Colours.Rule);
         y += 4;
     }
+
+    private string TargetsInView()
+    {
+        var now = scene.Targets.Select(t => TruthAtTime.At(t.Truth, timeS, scene.Beam.PeriodS)).OfType<TruthMark>().ToList();
+        return $"{now.Count(t => t.View == TargetView.InView)} of {now.Count}";
+    }
+
+    private static string Plots(int count) => count == 1 ? "1 plot" : $"{count} plots";
 
     private void Figure(string name, string value)
     {
@@ -52,7 +62,7 @@ internal sealed class SidePanel(Sheet sheet, Scene scene, ViewOptions view, doub
 
     private void PaintLegend()
     {
-        Entry(view.AfterglowScans == 1 ? "Plot of this scan" : $"Plots of {view.AfterglowScans} scans", c =>
+        Entry(view.AfterglowScans == 1 ? "Plot of this scan" : $"Plots, last {view.AfterglowScans} scans", c =>
         {
             for (var i = 3; i >= 0; i--)
             {

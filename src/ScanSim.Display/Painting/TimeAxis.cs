@@ -3,7 +3,7 @@ using SkiaSharp;
 namespace ScanSim.Display.Painting;
 
 /// <summary>Ticks at round clock times (UTC) under the timeline.</summary>
-internal sealed class TimeAxis(Sheet sheet, Scene scene, SKRect rows, float bottom)
+internal sealed class TimeAxis(Sheet sheet, Scene scene, SKRect rows)
 {
     private const float LeastTickPx = 84;
 
@@ -23,11 +23,11 @@ internal sealed class TimeAxis(Sheet sheet, Scene scene, SKRect rows, float bott
         foreach (var tickS in TicksS(scene.StartUtc, scene.DurationS, stepS))
         {
             var x = rows.Left + (float)(tickS / scene.DurationS) * rows.Width;
-            sheet.Line(new SKPoint(x, rows.Top), new SKPoint(x, bottom + 4), 1, sheet.Colours.Grid);
-            sheet.Text(Label(tickS, stepS), x, bottom + 16, TextStyle.Small, sheet.Colours.Quiet, SKTextAlign.Center);
+            sheet.Line(new SKPoint(x, rows.Top), new SKPoint(x, rows.Bottom + 4), 1, sheet.Colours.Grid);
+            sheet.Text(Label(tickS, stepS), x, rows.Bottom + 16, TextStyle.Small, sheet.Colours.Quiet, SKTextAlign.Center);
         }
 
-        sheet.Text("UTC", rows.Left - 26, bottom + 16, TextStyle.Small, sheet.Colours.Quiet, SKTextAlign.Right);
+        sheet.Text("UTC", rows.Left - 30, rows.Bottom + 16, TextStyle.Small, sheet.Colours.Quiet, SKTextAlign.Right);
     }
 
     private string Label(double tickS, double stepS)

@@ -3,8 +3,8 @@ using SkiaSharp;
 
 namespace ScanSim.Display.Painting;
 
-/// <summary>A row of a long recording: columns of several scans, filled from below by the share of each outcome.</summary>
-internal sealed class TimelineColumns(Sheet sheet, double durationS, SKRect row)
+/// <summary>A row of a long recording: each column is one scan or a few, filled from below by the share of each outcome.</summary>
+internal sealed class TimelineColumns(Sheet sheet, float scanPx, SKRect row)
 {
     /// <summary>From below: what was seen, then why the rest was not.</summary>
     private static readonly LookOutcome[] FromBelow =
@@ -13,33 +13,35 @@ internal sealed class TimelineColumns(Sheet sheet, double durationS, SKRect row)
         LookOutcome.MissedMasked, LookOutcome.MissedUnrecorded,
     ];
 
-    public void Paint(ImmutableArray<LookMark> looks)
+    private readonly int scansPerColumn = Math.Max(1, (int)MathF.Ceiling(OutcomeTexture.ColumnWidth / scanPx));
+
+    public void Paint(ImmutableArray<LookMark> looks, int firstScan)
     {
-        var columns = (int)(row.Width / OutcomeTexture.ColumnWidth);
         var counts = new int[Enum.GetValues<LookOutcome>().Length];
-        var next = 0;
-        for (var column = 0; column < columns; column++)
+        for (var next = 0; next < looks.Length;)
         {
             Array.Clear(counts);
-            var endS = durationS * (column + 1) * OutcomeTexture.ColumnWidth / row.Width;
+            var column = Column(looks[next], firstScan);
             var first = next;
-            for (; next < looks.Length && looks[next].TimeS < endS; next++)
+            for (; next < looks.Length && Column(looks[next], firstScan) == column; next++)
             {
                 counts[(int)looks[next].Outcome]++;
             }
 
-            if (next > first)
-            {
-                PaintColumn(row.Left + column * OutcomeTexture.ColumnWidth, counts, next - first);
-            }
+            PaintColumn(Edge(column), Edge(column + 1), counts, next - first);
         }
     }
 
-    private void PaintColumn(float left, int[] counts, int all)
+    private int Column(in LookMark look, int firstScan) => (look.Scan - firstScan) / scansPerColumn;
+
+    /// <summary>On whole units, so that neighbouring columns meet without a seam.</summary>
+    private float Edge(int column) => Math.Min(row.Right, MathF.Round(row.Left + column * scansPerColumn * scanPx));
+
+    private void PaintColumn(float left, float right, int[] counts, int all)
     {
         if (counts[(int)LookOutcome.NoLook] == all)
         {
-            OutcomeTexture.Fill(sheet, LookOutcome.NoLook, new SKRect(left, row.Top, left + OutcomeTexture.ColumnWidth, row.Bottom));
+            OutcomeTexture.Fill(sheet, LookOutcome.NoLook, new SKRect(left, row.Top, right, row.Bottom));
             return;
         }
 
@@ -49,7 +51,7 @@ internal sealed class TimelineColumns(Sheet sheet, double durationS, SKRect row)
             if (counts[(int)outcome] > 0)
             {
                 var top = bottom - row.Height * counts[(int)outcome] / all;
-                OutcomeTexture.Fill(sheet, outcome, new SKRect(left, top, left + OutcomeTexture.ColumnWidth, bottom));
+                OutcomeTexture.Fill(sheet, outcome, new SKRect(left, top, right, bottom));
                 bottom = top;
             }
         }

@@ -28,7 +28,7 @@ internal sealed class TimelineHead
             x += needed;
         }
 
-        Height = y + 8;
+        Height = y + 14;
     }
 
     public float Height { get; }

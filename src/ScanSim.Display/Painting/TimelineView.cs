@@ -21,20 +21,23 @@ internal sealed class TimelineView
     private readonly SKRect rows;
     private readonly float rowHeight;
     private readonly int shown;
+    private readonly float bottom;
+    private readonly int firstScan;
 
-    public TimelineView(Sheet sheet, Scene scene, double timeS, SKRect area, TimelineHead head)
+    public TimelineView(Sheet sheet, Scene scene, double timeS, PictureLayout layout, TimelineHead head)
     {
         this.sheet = sheet;
         this.scene = scene;
         this.timeS = timeS;
-        this.area = area;
+        area = layout.Timeline;
+        rowHeight = layout.RowHeight;
+        shown = layout.ShownTargets;
         this.head = head;
         var labels = scene.Targets.Select(t => sheet.Width(t.Id, TextStyle.Small)).DefaultIfEmpty(0).Max();
-        rows = new SKRect(area.Left + 16 + Math.Clamp(labels, 40, MostLabelWidth) + 10, area.Top + head.Height, area.Right - ShareWidth, area.Bottom - AxisHeight);
-        rowHeight = Math.Clamp(MathF.Floor(rows.Height / Math.Max(1, scene.Targets.Length)), PictureLayout.RowHeightLeast, PictureLayout.RowHeightMost);
-        var fitting = (int)(rows.Height / rowHeight);
-        // The last row's place tells how many more there are.
-        shown = scene.Targets.Length <= fitting ? scene.Targets.Length : fitting - 1;
+        var left = MathF.Ceiling(area.Left + 16 + Math.Clamp(labels, 40, MostLabelWidth) + 10);
+        rows = new SKRect(left, area.Top + head.Height, area.Right - ShareWidth, area.Bottom - AxisHeight);
+        bottom = rows.Bottom;
+        firstScan = scene.Scans.IsEmpty ? 0 : scene.Scans[0].Scan;
     }
 
     private float ScanPx => (float)(rows.Width * scene.Beam.PeriodS / scene.DurationS);
@@ -44,8 +47,8 @@ internal sealed class TimelineView
         sheet.Line(new SKPoint(area.Left, area.Top), new SKPoint(area.Right, area.Top), 1, sheet.Colours.Rule);
         var columns = ScanPx < LeastMarkPx;
         head.Paint(area.Top, columns);
-        sheet.Text("blip/scan", area.Right - 10, area.Top + head.Height - 3, TextStyle.Small, sheet.Colours.Quiet, SKTextAlign.Right);
-        new TimeAxis(sheet, scene, rows, rows.Top + Math.Max(1, shown) * rowHeight).Paint();
+        sheet.Text("blip/scan", area.Right - 16, area.Top + head.Height - 4, TextStyle.Small, sheet.Colours.Quiet, SKTextAlign.Right);
+        new TimeAxis(sheet, scene, rows).Paint();
         for (var i = 0; i < shown; i++)
         {
             var row = new SKRect(rows.Left, rows.Top + i * rowHeight, rows.Right, rows.Top + (i + 1) * rowHeight);
@@ -54,7 +57,7 @@ internal sealed class TimelineView
 
         if (shown < scene.Targets.Length)
         {
-            sheet.Text($"+ {scene.Targets.Length - shown} more", area.Left + 16, rows.Top + shown * rowHeight + 11, TextStyle.Small, sheet.Colours.Quiet);
+            sheet.Text($"+ {scene.Targets.Length - shown} more targets", rows.Left, bottom - 4, TextStyle.Small, sheet.Colours.Quiet);
         }
 
         PaintNow();
@@ -70,7 +73,7 @@ internal sealed class TimelineView
         sheet.Text(share, area.Right - 16, baseline, TextStyle.Small, sheet.Colours.Ink, SKTextAlign.Right);
         if (columns)
         {
-            new TimelineColumns(sheet, scene.DurationS, SKRect.Inflate(row, 0, -2)).Paint(target.Looks);
+            new TimelineColumns(sheet, ScanPx, SKRect.Inflate(row, 0, -2)).Paint(target.Looks, firstScan);
             return;
         }
 
@@ -87,7 +90,7 @@ internal sealed class TimelineView
     {
         var x = X(timeS);
         var top = rows.Top - 1;
-        sheet.Line(new SKPoint(x, top), new SKPoint(x, rows.Top + Math.Max(1, shown) * rowHeight + 4), 1.2f, sheet.Colours.Ink);
+        sheet.Line(new SKPoint(x, top), new SKPoint(x, bottom + 4), 1.2f, sheet.Colours.Ink);
         using var tip = new SKPath();
         tip.MoveTo(x - 4.5f, top - 6);
         tip.LineTo(x + 4.5f, top - 6);
