@@ -1,0 +1,3 @@
+namespace ScanSim.Recordings.Columns;
+
+internal delegate TValue RowValue<TRow, TValue>(in TRow row);
