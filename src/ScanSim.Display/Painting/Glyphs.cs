@@ -1,0 +1,103 @@
+using SkiaSharp;
+
+namespace ScanSim.Display.Painting;
+
+/// <summary>The shapes of the picture, the same in plan, timeline and legends.</summary>
+internal static class Glyphs
+{
+    public const float PlotRadius = 3.2f;
+    public const float FalsePlotRadius = 4.2f;
+    public const float TruthRadius = 5.5f;
+
+    public static void FalsePlot(SKPath into, SKPoint centre, float scale = 1)
+    {
+        var r = FalsePlotRadius * scale;
+        into.MoveTo(centre.X, centre.Y - r);
+        into.LineTo(centre.X + r, centre.Y);
+        into.LineTo(centre.X, centre.Y + r);
+        into.LineTo(centre.X - r, centre.Y);
+        into.Close();
+    }
+
+    /// <summary>A ring with a stroke along the course (east, north); four arcs and no stroke when the radar cannot look at the target.</summary>
+    public static void Truth(SKPath into, SKPoint centre, float eastMps, float northMps, bool inView, float scale = 1)
+    {
+        var r = TruthRadius * scale;
+        if (!inView)
+        {
+            var box = new SKRect(centre.X - r, centre.Y - r, centre.X + r, centre.Y + r);
+            for (var start = 22f; start < 360; start += 90)
+            {
+                into.AddArc(box, start, 46);
+            }
+
+            return;
+        }
+
+        into.AddCircle(centre.X, centre.Y, r);
+        var speed = MathF.Sqrt(eastMps * eastMps + northMps * northMps);
+        if (speed > 0)
+        {
+            var (ux, uy) = (eastMps / speed, -northMps / speed);
+            into.MoveTo(centre.X + ux * r, centre.Y + uy * r);
+            into.LineTo(centre.X + ux * (r + 7 * scale), centre.Y + uy * (r + 7 * scale));
+        }
+    }
+
+    /// <summary>The mark of one scan's outcome, within <paramref name="r"/> of its centre.</summary>
+    public static void Outcome(Sheet sheet, LookOutcome outcome, SKPoint centre, float r)
+    {
+        var colour = sheet.Colours.Outcomes[(int)outcome];
+        if (outcome == LookOutcome.Detected)
+        {
+            sheet.Disc(centre, r, colour);
+            return;
+        }
+
+        using var path = new SKPath();
+        if (outcome == LookOutcome.MissedMasked)
+        {
+            Triangle(path, centre, r, -1);
+            sheet.Fill(path, colour);
+            return;
+        }
+
+        switch (outcome)
+        {
+            case LookOutcome.MissedRange:
+                Triangle(path, centre, r, 1);
+                break;
+            case LookOutcome.MissedBeam:
+                path.AddRect(new SKRect(centre.X - 0.8f * r, centre.Y - 0.8f * r, centre.X + 0.8f * r, centre.Y + 0.8f * r));
+                break;
+            case LookOutcome.MissedChance:
+                Cross(path, centre, 0.85f * r);
+                break;
+            case LookOutcome.MissedUnrecorded:
+                path.AddCircle(centre.X, centre.Y, 0.9f * r);
+                break;
+            default:
+                path.MoveTo(centre.X - r, centre.Y);
+                path.LineTo(centre.X + r, centre.Y);
+                break;
+        }
+
+        sheet.Outline(path, r < 3.5f ? 1.2f : 1.5f, colour);
+    }
+
+    private static void Triangle(SKPath path, SKPoint centre, float r, int down)
+    {
+        path.MoveTo(centre.X - r, centre.Y - down * 0.75f * r);
+        path.LineTo(centre.X + r, centre.Y - down * 0.75f * r);
+        path.LineTo(centre.X, centre.Y + down * 0.95f * r);
+        path.Close();
+    }
+
+    private static void Cross(SKPath path, SKPoint centre, float r)
+    {
+        path.MoveTo(centre.X - r, centre.Y - r);
+        path.LineTo(centre.X + r, centre.Y + r);
+        path.MoveTo(centre.X - r, centre.Y + r);
+        path.LineTo(centre.X + r, centre.Y - r);
+    }
+}

@@ -1,0 +1,75 @@
+using SkiaSharp;
+
+namespace ScanSim.Display.Painting;
+
+/// <summary>Scale bar, north arrow, site mark and name.</summary>
+internal sealed class PlanFurniture
+{
+    private readonly Sheet sheet;
+    private readonly PlanProjection plan;
+    private readonly string siteName;
+    private readonly float barPx;
+    private readonly string barText;
+    private readonly SKRect barBox;
+    private readonly SKRect arrowBox;
+    private readonly SKRect siteBox;
+
+    public PlanFurniture(Sheet sheet, PlanProjection plan, string siteName, RangeUnit unit)
+    {
+        this.sheet = sheet;
+        this.plan = plan;
+        this.siteName = sheet.Fit(siteName, TextStyle.Strong, 200);
+        var metres = RangeText.MetresPerUnit(unit);
+        var barM = NiceStep.AtLeast(60 * plan.MetresPerPx / metres) * metres;
+        barPx = plan.ToPx(barM);
+        barText = RangeText.OfStep(barM, unit);
+        barBox = SKRect.Create(plan.Area.Left + 16, plan.Area.Bottom - 38, Math.Max(barPx, sheet.Width(barText, TextStyle.Small)) + 4, 26);
+        arrowBox = SKRect.Create(plan.Area.Left + 14, plan.Area.Top + 12, 20, 46);
+        siteBox = SKRect.Create(plan.Origin.X + 8, plan.Origin.Y + 6, sheet.Width(this.siteName, TextStyle.Strong) + 4, 15);
+    }
+
+    /// <summary>What labels must not cover.</summary>
+    public IReadOnlyList<SKRect> Boxes => [barBox, arrowBox, siteBox, SiteMark];
+
+    private SKRect SiteMark => new(plan.Origin.X - 7, plan.Origin.Y - 7, plan.Origin.X + 7, plan.Origin.Y + 7);
+
+    public void Paint()
+    {
+        PaintScaleBar();
+        PaintNorthArrow();
+        var origin = plan.Origin;
+        var ink = sheet.Colours.Ink;
+        sheet.Line(new SKPoint(origin.X - 6, origin.Y), new SKPoint(origin.X + 6, origin.Y), 1.5f, ink);
+        sheet.Line(new SKPoint(origin.X, origin.Y - 6), new SKPoint(origin.X, origin.Y + 6), 1.5f, ink);
+        if (plan.Area.Contains(siteBox))
+        {
+            sheet.Rect(siteBox, sheet.Colours.Ground.WithAlpha(0xB0));
+            sheet.Text(siteName, siteBox.Left + 2, siteBox.Bottom - 3.5f, TextStyle.Strong, ink);
+        }
+    }
+
+    private void PaintScaleBar()
+    {
+        var quiet = sheet.Colours.Quiet;
+        var (left, y) = (barBox.Left, barBox.Bottom - 2);
+        sheet.Line(new SKPoint(left, y), new SKPoint(left + barPx, y), 1.5f, quiet);
+        sheet.Line(new SKPoint(left, y - 5), new SKPoint(left, y + 0.75f), 1.5f, quiet);
+        sheet.Line(new SKPoint(left + barPx, y - 5), new SKPoint(left + barPx, y + 0.75f), 1.5f, quiet);
+        sheet.Text(barText, left, y - 9, TextStyle.Small, quiet);
+    }
+
+    private void PaintNorthArrow()
+    {
+        var quiet = sheet.Colours.Quiet;
+        var (x, top) = (arrowBox.MidX, arrowBox.Top);
+        using var head = new SKPath();
+        head.MoveTo(x, top);
+        head.LineTo(x + 5, top + 13);
+        head.LineTo(x, top + 10);
+        head.LineTo(x - 5, top + 13);
+        head.Close();
+        sheet.Fill(head, quiet);
+        sheet.Line(new SKPoint(x, top + 9), new SKPoint(x, top + 26), 1.5f, quiet);
+        sheet.Text("N", x, top + 41, TextStyle.Strong, quiet, SKTextAlign.Center);
+    }
+}

@@ -1,0 +1,40 @@
+using SkiaSharp;
+
+namespace ScanSim.Display.Painting;
+
+/// <summary>Ticks at round clock times (UTC) under the timeline.</summary>
+internal sealed class TimeAxis(Sheet sheet, Scene scene, SKRect rows)
+{
+    private const float LeastTickPx = 84;
+
+    /// <summary>Tick times in seconds since the start.</summary>
+    public static IEnumerable<double> TicksS(DateTimeOffset startUtc, double durationS, double stepS)
+    {
+        var startOfDayS = startUtc.ToUniversalTime().TimeOfDay.TotalSeconds;
+        for (var n = Math.Ceiling(startOfDayS / stepS); n * stepS - startOfDayS <= durationS; n++)
+        {
+            yield return n * stepS - startOfDayS;
+        }
+    }
+
+    public void Paint()
+    {
+        var stepS = NiceStep.TimeAtLeast(scene.DurationS * LeastTickPx / rows.Width);
+        foreach (var tickS in TicksS(scene.StartUtc, scene.DurationS, stepS))
+        {
+            var x = rows.Left + (float)(tickS / scene.DurationS) * rows.Width;
+            sheet.Line(new SKPoint(x, rows.Top), new SKPoint(x, rows.Bottom + 4), 1, sheet.Colours.Grid);
+            sheet.Text(Label(tickS, stepS), x, rows.Bottom + 16, TextStyle.Small, sheet.Colours.Quiet, SKTextAlign.Center);
+        }
+
+        sheet.Text("UTC", rows.Left - 30, rows.Bottom + 16, TextStyle.Small, sheet.Colours.Quiet, SKTextAlign.Right);
+    }
+
+    private string Label(double tickS, double stepS)
+    {
+        // Half a millisecond keeps 11:59:59.9999999 from being cut to 11:59.
+        var time = scene.StartUtc.ToUniversalTime().AddSeconds(tickS).AddMilliseconds(0.5);
+        var isMidnight = time is { Hour: 0, Minute: 0, Second: 0 };
+        return isMidnight ? time.ToString("yyyy-MM-dd") : time.ToString(stepS < 60 ? "HH:mm:ss" : "HH:mm");
+    }
+}

@@ -1,0 +1,97 @@
+using ScanSim.Display.Painting;
+using SkiaSharp;
+
+namespace ScanSim.Display;
+
+/// <summary>Still pictures as files: PNG, SVG or PDF, by the name's ending. The same input gives the same bytes on the same system.</summary>
+public static class Picture
+{
+    /// <summary>Writes beside the file and renames, so that a broken picture never stands under the name asked for.</summary>
+    public static void Save(Scene scene, ViewOptions view, double timeS, PictureSize size, string path)
+    {
+        var draw = FormatOf(path);
+        size.Check();
+        var unfinished = path + ".part";
+        try
+        {
+            using (var stream = File.Create(unfinished))
+            {
+                draw(scene, view, timeS, size, stream);
+            }
+
+            File.Move(unfinished, path, overwrite: true);
+        }
+        catch (Exception fault) when (fault is IOException or UnauthorizedAccessException)
+        {
+            Discard(unfinished);
+            throw new PictureException($"Picture '{path}' could not be written: {fault.Message}", fault);
+        }
+        catch
+        {
+            Discard(unfinished);
+            throw;
+        }
+    }
+
+    private static Action<Scene, ViewOptions, double, PictureSize, Stream> FormatOf(string path) =>
+        Path.GetExtension(path).ToUpperInvariant() switch
+        {
+            ".PNG" => Png,
+            ".SVG" => Svg,
+            ".PDF" => Pdf,
+            var other => throw new PictureException(
+                $"Picture '{path}' has {(other.Length == 0 ? "no ending" : $"the ending '{Path.GetExtension(path)}'")}: it must end in .png, .svg or .pdf."),
+        };
+
+    private static void Png(Scene scene, ViewOptions view, double timeS, PictureSize size, Stream into)
+    {
+        using var surface = SKSurface.Create(new SKImageInfo(size.WidthPx, size.HeightPx, SKColorType.Rgba8888, SKAlphaType.Premul))
+            ?? throw new PictureException($"There is no memory for a picture of {size.WidthPx} x {size.HeightPx} pixels.");
+        new Painter(scene).Paint(surface.Canvas, size, view, timeS);
+        using var image = surface.Snapshot();
+        using var pixels = image.PeekPixels();
+        // No filter and medium compression: the quickest of the small ones for flat colours.
+        using var data = pixels.Encode(new SKPngEncoderOptions(SKPngEncoderFilterFlags.None, 6))
+            ?? throw new PictureException($"A picture of {size.WidthPx} x {size.HeightPx} pixels could not be encoded as PNG.");
+        data.SaveTo(into);
+    }
+
+    private static void Svg(Scene scene, ViewOptions view, double timeS, PictureSize size, Stream into)
+    {
+        using var canvas = SKSvgCanvas.Create(SKRect.Create(size.WidthPx, size.HeightPx), into);
+        new Painter(scene) { ForSvg = true }.Paint(canvas, size, view, timeS);
+    }
+
+    private static void Pdf(Scene scene, ViewOptions view, double timeS, PictureSize size, Stream into)
+    {
+        // The date of what is shown, not of the making: the bytes must not depend on the clock.
+        var date = scene.StartUtc.UtcDateTime;
+        var metadata = new SKDocumentPdfMetadata
+        {
+            Title = scene.ScenarioName,
+            Creator = "ScanSim",
+            Producer = "ScanSim",
+            Creation = date,
+            Modified = date,
+            RasterDpi = SKDocument.DefaultRasterDpi,
+            EncodingQuality = 101,
+        };
+        using var document = SKDocument.CreatePdf(into, metadata);
+        var canvas = document.BeginPage(size.WidthPx, size.HeightPx);
+        new Painter(scene).Paint(canvas, size, view, timeS);
+        document.EndPage();
+        document.Close();
+    }
+
+    private static void Discard(string path)
+    {
+        try
+        {
+            File.Delete(path);
+        }
+        catch (Exception fault) when (fault is IOException or UnauthorizedAccessException)
+        {
+            // The first fault is the one to report.
+        }
+    }
+}

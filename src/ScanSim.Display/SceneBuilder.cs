@@ -1,0 +1,89 @@
+using System.Collections.Immutable;
+using System.Runtime.InteropServices;
+using ScanSim.Recordings;
+using ScanSim.Scenarios;
+
+namespace ScanSim.Display;
+
+/// <summary>Gathers the rows of a run or a recording into a <see cref="Scene"/>. Rows come in order of time, as a sink gets them.</summary>
+public sealed class SceneBuilder : IRecordingSink
+{
+    private readonly Scenario scenario;
+    private readonly Dictionary<string, TargetGathering> gatherings = new(StringComparer.Ordinal);
+    private readonly List<ScanRow> scans = [];
+    private readonly List<PlotMark> plots = [];
+    private bool anyLooks;
+
+    public SceneBuilder(Scenario scenario)
+    {
+        this.scenario = scenario;
+        foreach (var target in scenario.Targets)
+        {
+            gatherings.Add(target.Id, new TargetGathering(target));
+        }
+    }
+
+    public void AddScan(in ScanRow row) => scans.Add(row);
+
+    public void AddLooks(ReadOnlySpan<LookRow> rows)
+    {
+        anyLooks |= rows.Length > 0;
+        foreach (ref readonly var row in rows)
+        {
+            Of(row.Target, "looks").Add(row);
+        }
+    }
+
+    /// <summary>Hits are not drawn yet; the plots made of them are.</summary>
+    public void AddHits(ReadOnlySpan<HitRow> rows)
+    {
+    }
+
+    public void AddPlots(ReadOnlySpan<PlotRow> rows)
+    {
+        foreach (ref readonly var row in rows)
+        {
+            var (sin, cos) = Math.SinCos(row.AzimuthDeg * (Math.PI / 180));
+            plots.Add(new PlotMark(row.TimeS, row.Scan, (float)(row.RangeM * sin), (float)(row.RangeM * cos), row.Kind));
+            if (row.Kind == EchoKind.Target)
+            {
+                foreach (var id in row.Target.Split('+'))
+                {
+                    Of(id, "plots").AddPlot(row.Scan);
+                }
+            }
+        }
+    }
+
+    public void AddTruth(ReadOnlySpan<TruthRow> rows)
+    {
+        foreach (ref readonly var row in rows)
+        {
+            Of(row.Target, "truth").Add(row);
+        }
+    }
+
+    public Scene Build()
+    {
+        // Plots close after the beam has passed: neighbours in azimuth may come in the other order.
+        CollectionsMarshal.AsSpan(plots).Sort(static (a, b) => a.TimeS.CompareTo(b.TimeS));
+        return new Scene
+        {
+            ScenarioName = scenario.Name,
+            SiteName = scenario.Site.Name,
+            InstrumentedRangeM = scenario.Radar.InstrumentedRangeM,
+            Beam = new BeamMotion(scenario.Radar.Scan),
+            BeamwidthRad = scenario.Radar.Antenna.Azimuth.BeamwidthRad,
+            Blanked = scenario.Radar.Blanked,
+            StartUtc = scenario.Run.Start,
+            DurationS = scenario.Run.DurationS,
+            Targets = [.. scenario.Targets.Select(t => gatherings[t.Id].Build(anyLooks))],
+            Scans = [.. scans],
+            Plots = [.. plots],
+        };
+    }
+
+    private TargetGathering Of(string id, string table) => gatherings.TryGetValue(id, out var found)
+        ? found
+        : throw new PictureException($"The recording's {table} table names target '{id}', which its scenario '{scenario.Name}' does not have.");
+}

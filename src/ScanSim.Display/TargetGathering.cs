@@ -1,0 +1,89 @@
+using System.Collections.Immutable;
+using ScanSim.Recordings;
+using ScanSim.Scenarios;
+
+namespace ScanSim.Display;
+
+/// <summary>The rows of one target while a scene is gathered.</summary>
+internal sealed class TargetGathering(Target target)
+{
+    private readonly List<TruthMark> truth = [];
+    private readonly List<LookMark> looks = [];
+    private readonly HashSet<int> scansWithPlot = [];
+
+    public void Add(in TruthRow row)
+    {
+        var (sin, cos) = Math.SinCos(row.AzimuthDeg * (Math.PI / 180));
+        truth.Add(new TruthMark(
+            row.TimeS, row.Scan, (float)(row.RangeM * sin), (float)(row.RangeM * cos), (float)row.EastMps, (float)row.NorthMps, row.View));
+    }
+
+    /// <summary>Keeps one look a scan: the strongest detected one, or the strongest if none was detected.</summary>
+    public void Add(in LookRow row)
+    {
+        var mark = new LookMark(row.TimeS, row.Scan, (float)row.SnrDb, OutcomeOf(row));
+        if (looks.Count == 0 || looks[^1].Scan != mark.Scan)
+        {
+            looks.Add(mark);
+            return;
+        }
+
+        var (isDetected, wasDetected) = (mark.Outcome == LookOutcome.Detected, looks[^1].Outcome == LookOutcome.Detected);
+        if (isDetected == wasDetected ? mark.SnrDb > looks[^1].SnrDb : isDetected)
+        {
+            looks[^1] = mark;
+        }
+    }
+
+    public void AddPlot(int scan) => scansWithPlot.Add(scan);
+
+    public SceneTarget Build(bool recordingHasLooks)
+    {
+        var lookOfScan = looks.ToDictionary(l => l.Scan);
+        var marks = ImmutableArray.CreateBuilder<LookMark>(truth.Count);
+        var inView = 0;
+        var withPlot = 0;
+        foreach (var t in truth)
+        {
+            var looked = lookOfScan.Remove(t.Scan, out var look);
+            marks.Add(looked ? look : new LookMark(t.TimeS, t.Scan, float.NaN, WithoutLook(t, recordingHasLooks)));
+            if (t.View == TargetView.InView || looked)
+            {
+                inView++;
+                withPlot += scansWithPlot.Contains(t.Scan) ? 1 : 0;
+            }
+        }
+
+        // A look in a scan whose truth row lies beyond the track's end, for instance.
+        marks.AddRange(lookOfScan.Values);
+        marks.Sort(static (a, b) => a.TimeS.CompareTo(b.TimeS));
+        return new SceneTarget
+        {
+            Id = target.Id,
+            Class = target.Class,
+            Truth = [.. truth],
+            Looks = marks.DrainToImmutable(),
+            ScansInView = inView,
+            ScansWithPlot = withPlot,
+        };
+    }
+
+    private LookOutcome WithoutLook(in TruthMark mark, bool recordingHasLooks)
+    {
+        if (recordingHasLooks || mark.View != TargetView.InView)
+        {
+            return LookOutcome.NoLook;
+        }
+
+        return scansWithPlot.Contains(mark.Scan) ? LookOutcome.Detected : LookOutcome.MissedUnrecorded;
+    }
+
+    private static LookOutcome OutcomeOf(in LookRow row) => (row.Detected, row.LostTo) switch
+    {
+        (true, _) => LookOutcome.Detected,
+        (_, LossReason.AzimuthBeam or LossReason.ElevationBeam) => LookOutcome.MissedBeam,
+        (_, LossReason.Fluctuation) => LookOutcome.MissedChance,
+        (_, LossReason.Eclipsing or LossReason.SharedCell) => LookOutcome.MissedMasked,
+        _ => LookOutcome.MissedRange,
+    };
+}
