@@ -26,6 +26,27 @@ public sealed class EffectiveEarthTests
         elevations.Conclude();
     }
 
+    /// <summary>The model's own error, where it is meant to be used: up to 100 km and 10 km height.</summary>
+    [Fact]
+    public void The_effective_earth_sees_a_target_where_an_exponential_atmosphere_bends_the_ray_to()
+    {
+        var table = ReferenceTable.Load("earth_ray_heights.csv");
+        var comparison = new Comparison("Elevation on the 4/3 earth against rays through an exponential atmosphere", table.Source, 5e-4, 0.0, "rad");
+        foreach (string[] row in table.Rows)
+        {
+            double heightKm = table.Number(row, "height_exponential_km");
+            if (heightKm <= 10.0 && table.Number(row, "slant_range_km") <= 100.0)
+            {
+                comparison.Add(
+                    $"{table.Text(row, "elevation_deg")} deg, {table.Text(row, "slant_range_km")} km",
+                    Degrees.ToRad(table.Number(row, "elevation_deg")),
+                    FourThirds.ElevationRad(0.0, 1e3 * heightKm, 1e3 * table.Number(row, "ground_exponential_km")));
+            }
+        }
+
+        comparison.Conclude();
+    }
+
     [Fact]
     public void Horizons_agree_with_the_arc_and_with_the_published_rules()
     {
