@@ -30,9 +30,12 @@ public sealed class RadarEquationTermsTests
     [Fact]
     public void Each_solution_put_back_gives_the_wanted_ratio()
     {
-        Gen.Select(AnyTerms, Decades(-3, 6)).Sample(
-            (t, snr) =>
+        Property.Holds(
+            Gen.Select(AnyTerms, Decades(-3, 6)),
+            2000,
+            v =>
             {
+                var (t, snr) = v;
                 double[] back =
                 [
                     (t with { RangeM = t.SolveRangeM(snr) }).SnrRatio(),
@@ -43,9 +46,7 @@ public sealed class RadarEquationTermsTests
                     (t with { LossRatio = t.SolveLossRatio(snr) }).SnrRatio(),
                 ];
                 return Array.TrueForAll(back, b => Math.Abs(b / snr - 1.0) < 1e-14);
-            },
-            seed: "0N0XIzNsQ0O2",
-            iter: 2000);
+            });
     }
 
     [Fact]

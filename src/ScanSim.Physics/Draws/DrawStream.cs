@@ -19,15 +19,6 @@ public struct DrawStream
     /// <summary>2⁻⁵².</summary>
     private const double UniformStep = 1.0 / (1L << 52);
 
-    /// <summary>Above this shape Marsaglia and Tsang's method is quicker than a product of uniform numbers; measured.</summary>
-    private const int LargestProductShape = 4;
-
-    /// <summary>Below this mean the sequential search is quicker and the rejection's setup does not hold.</summary>
-    private const double SmallestRejectionMean = 10.0;
-
-    /// <summary>Greatest mean whose draws fit an int with certainty for practical purposes (2³⁰ is 32,000 standard deviations below 2³¹).</summary>
-    private const double LargestMean = 1 << 30;
-
     private readonly uint purpose;
     private readonly uint entity;
     private readonly uint run;
@@ -104,44 +95,13 @@ public struct DrawStream
     /// <summary>Exponential with mean 1: −ln of a uniform number. At most 36.8.</summary>
     public double NextExponential() => -Math.Log(NextUniform());
 
-    /// <summary>Gamma with the given shape and scale 1 (mean = shape). Shape 0 gives 0.</summary>
-    /// <remarks>
-    /// Shape 1 to 4 and whole: −ln of a product of that many uniform numbers. Else G. Marsaglia and W. W. Tsang, A simple method
-    /// for generating gamma variables, ACM TOMS 26 (2000), pp. 363-372, with its power of a uniform number for shapes below 1.
-    /// </remarks>
+    /// <summary>Gamma with the given shape and scale 1 (mean = shape). Shape 0 gives 0. Methods: <see cref="GammaDraw"/>.</summary>
     /// <exception cref="ArgumentOutOfRangeException">The shape is negative, infinite or NaN.</exception>
-    public double NextGamma(double shape)
-    {
-        if (!(shape >= 0.0 && shape < double.PositiveInfinity))
-        {
-            throw new ArgumentOutOfRangeException(nameof(shape), shape, "the shape of a gamma distribution is finite and at least 0");
-        }
+    public double NextGamma(double shape) => GammaDraw.Next(ref this, shape);
 
-        if (shape <= LargestProductShape && shape == Math.Floor(shape))
-        {
-            return GammaByProduct((int)shape);
-        }
-
-        return shape < 1.0
-            ? GammaByRejection(shape + 1.0) * Math.Pow(NextUniform(), 1.0 / shape)
-            : GammaByRejection(shape);
-    }
-
-    /// <summary>Poisson with the given mean.</summary>
-    /// <remarks>
-    /// Mean below 10: sequential search from 0. From 10: the transformed rejection PTRS of W. Hörmann, The transformed rejection
-    /// method for generating Poisson random variables, Insurance: Mathematics and Economics 12 (1993), pp. 39-45.
-    /// </remarks>
+    /// <summary>Poisson with the given mean. Methods: <see cref="PoissonDraw"/>.</summary>
     /// <exception cref="ArgumentOutOfRangeException">The mean is negative, NaN or above 2³⁰.</exception>
-    public int NextPoisson(double mean)
-    {
-        if (!(mean >= 0.0 && mean <= LargestMean))
-        {
-            throw new ArgumentOutOfRangeException(nameof(mean), mean, "the mean of a Poisson distribution lies from 0 to 2^30");
-        }
-
-        return mean < SmallestRejectionMean ? PoissonBySearch(mean) : PoissonByRejection(mean);
-    }
+    public int NextPoisson(double mean) => PoissonDraw.Next(ref this, mean);
 
     /// <summary>Two blocks at a time: their rounds overlap in the processor, so the second costs next to nothing.</summary>
     private void Refill()
@@ -154,85 +114,6 @@ public struct DrawStream
         Philox.TwoBlocks(purpose | nextBlock, entity, run, index, key0, key1, words);
         nextBlock += 2;
         wordsLeft = WordCount;
-    }
-
-    private double GammaByProduct(int shape)
-    {
-        double product = 1.0;
-        for (int i = 0; i < shape; i++)
-        {
-            product *= NextUniform();
-        }
-
-        return shape == 0 ? 0.0 : -Math.Log(product);
-    }
-
-    private double GammaByRejection(double shape)
-    {
-        double d = shape - 1.0 / 3.0;
-        double c = 1.0 / Math.Sqrt(9.0 * d);
-        while (true)
-        {
-            double x = NextNormal();
-            double root = 1.0 + c * x;
-            if (root <= 0.0)
-            {
-                continue;
-            }
-
-            double v = root * root * root;
-            double u = NextUniform();
-            double square = x * x;
-            if (u < 1.0 - 0.0331 * square * square || Math.Log(u) < 0.5 * square + d * (1.0 - v + Math.Log(v)))
-            {
-                return d * v;
-            }
-        }
-    }
-
-    private int PoissonBySearch(double mean)
-    {
-        double left = NextUniform();
-        double mass = Math.Exp(-mean);
-        int count = 0;
-        // The masses are summed with rounding: past the point where they no longer change the sum the search ends.
-        while (left > mass && (mass > UniformStep / 16.0 || count < mean))
-        {
-            left -= mass;
-            count++;
-            mass *= mean / count;
-        }
-
-        return count;
-    }
-
-    private int PoissonByRejection(double mean)
-    {
-        double b = 0.931 + 2.53 * Math.Sqrt(mean);
-        double a = -0.059 + 0.02483 * b;
-        double inverseAlpha = 1.1239 + 1.1328 / (b - 3.4);
-        double squeeze = 0.9277 - 3.6224 / (b - 2.0);
-        while (true)
-        {
-            double u = NextUniform() - 0.5;
-            double v = NextUniform();
-            double us = 0.5 - Math.Abs(u);
-            double k = Math.Floor((2.0 * a / us + b) * u + mean + 0.43);
-            if (us >= 0.07 && v <= squeeze)
-            {
-                return (int)k;
-            }
-
-            if (k < 0.0 || k > int.MaxValue || (us < 0.013 && v > us))
-            {
-                continue;
-            }
-
-            if (Math.Log(v * inverseAlpha / (a / (us * us) + b)) <= PoissonMass.Log((int)k, mean))
-            {
-                return (int)k;
-            }
-        }
     }
 
     [InlineArray(WordCount)]

@@ -30,7 +30,8 @@ public readonly record struct EffectiveEarth(double RadiusM)
     {
         double sine = Math.Sin(0.5 * groundM / RadiusM);
         double riseM = targetM - antennaM;
-        return Math.Sqrt(riseM * riseM + 4.0 * (RadiusM + antennaM) * (RadiusM + targetM) * sine * sine);
+        double farM = 2.0 * (RadiusM + targetM) * sine;
+        return Math.Sqrt(riseM * riseM + 2.0 * (RadiusM + antennaM) * sine * farM);
     }
 
     public double ElevationRad(double antennaM, double targetM, double groundM) =>
