@@ -38,13 +38,19 @@ internal static class RunCommand
         command.SetAction(parsed =>
         {
             var scenario = ScenarioFile.Load(parsed.GetValue(file)!);
-            var plan = scenario.Run with
+            scenario = scenario with
             {
-                Seed = parsed.GetValue(seed) ?? scenario.Run.Seed,
-                DurationS = parsed.GetValue(duration) ?? scenario.Run.DurationS,
+                Run = scenario.Run with
+                {
+                    Seed = parsed.GetValue(seed) ?? scenario.Run.Seed,
+                    DurationS = parsed.GetValue(duration) ?? scenario.Run.DurationS,
+                },
             };
-            ScenarioFile.CheckRun(scenario, plan, parsed.GetValue(file)!);
-            scenario = scenario with { Run = plan };
+            if (RunLimits.Broken(scenario) is { } problem)
+            {
+                throw new InputException($"{parsed.GetValue(file)}: {problem}");
+            }
+
             var options = new RunOptions { Threads = parsed.GetValue(threads), Looks = parsed.GetValue(looks) };
             var tally = Run(scenario, options, parsed.GetValue(folder)!, parsed.GetValue(format), parsed.GetValue(force), interruption);
             RunSummary.Write(Console.Out, scenario, tally, parsed.GetValue(unit));

@@ -9,6 +9,7 @@ internal static class TextTable
     /// <summary>Wide enough that no table of ours is wrapped.</summary>
     private const int WidthInCharacters = 240;
 
+    /// <summary>Writes the table without trailing blanks.</summary>
     /// <param name="output">Where to.</param>
     /// <param name="columns">Headings; one that begins with '&gt;' is of a column that is set flush right.</param>
     /// <param name="rows">As many cells each as there are columns.</param>

@@ -101,7 +101,7 @@ internal sealed class ScanWorker
         for (var from = 0; from < count;)
         {
             var to = from + 1;
-            while (to < count && keys[to] >> TargetBits == keys[from] >> TargetBits)
+            while (to < count && keys[to] >> RunLimits.TargetBits == keys[from] >> RunLimits.TargetBits)
             {
                 to++;
             }
@@ -137,10 +137,7 @@ internal sealed class ScanWorker
         }
     }
 
-    private const int TargetBits = 20;
-    private const int CellBits = 24;
-
-    /// <summary>Room for 2²⁰ dwells a scan, 2²⁴ cells and 2²⁰ targets; the scenario's checks keep within that.</summary>
+    /// <summary>Room is kept by <see cref="RunLimits"/>.</summary>
     private static ulong SortKey(long dwellInScan, int cell, int target) =>
-        ((ulong)dwellInScan << (CellBits + TargetBits)) | ((ulong)cell << TargetBits) | (uint)target;
+        ((ulong)dwellInScan << (RunLimits.CellBits + RunLimits.TargetBits)) | ((ulong)cell << RunLimits.TargetBits) | (uint)target;
 }

@@ -12,7 +12,7 @@ public sealed class Comparison(string claim, string source, double absolute, dou
 {
     private readonly List<string> failures = [];
     private double worstExcess = -1;
-    private double worstDifference;
+    private string worstText = "";
     private string worstRow = "";
 
     public int Count { get; private set; }
@@ -31,7 +31,9 @@ public sealed class Comparison(string claim, string source, double absolute, dou
         if (double.IsNaN(excess) || excess > worstExcess)
         {
             worstExcess = double.IsNaN(excess) ? double.PositiveInfinity : excess;
-            worstDifference = difference;
+            worstText = absolute > 0 || expected == 0
+                ? string.Create(CultureInfo.InvariantCulture, $"{difference:0.0E+0} {unit}").Trim()
+                : string.Create(CultureInfo.InvariantCulture, $"{difference / Math.Abs(expected):0.0E+0} relative");
             worstRow = row;
         }
     }
@@ -43,7 +45,7 @@ public sealed class Comparison(string claim, string source, double absolute, dou
         Assert.True(
             failures.Count == 0,
             $"{claim}: {failures.Count} of {Count} rows are off; the first ones:\n{string.Join('\n', failures.Take(10))}\nworst: {worstRow}");
-        ValidationLog.Record(new ValidationEntry(claim, source, Count, Allowance(), string.Create(CultureInfo.InvariantCulture, $"{worstDifference:0.0E+0} {unit}").Trim(), worstRow));
+        ValidationLog.Record(new ValidationEntry(claim, source, Count, Allowance(), worstText, worstRow));
     }
 
     private string Allowance()

@@ -27,7 +27,7 @@ public sealed class ValidationPage : IDisposable
             return;
         }
 
-        var page = Path.Combine(root, "docs", "validation.md");
+        var page = Path.Combine(Directory.CreateDirectory(Path.Combine(root, "docs")).FullName, "validation.md");
         using var turn = WaitForTurn(Path.Combine(Path.GetTempPath(), "scansim-validation-" + Convert.ToHexString(System.Security.Cryptography.SHA256.HashData(Encoding.UTF8.GetBytes(root)))[..12] + ".lock"));
         var sections = File.Exists(page) ? Parse(File.ReadAllText(page)) : new SortedDictionary<string, SortedDictionary<string, string>>(StringComparer.Ordinal);
         if (!sections.TryGetValue(section, out var lines))
