@@ -33,8 +33,7 @@ public static class UnequalPulses
         }
 
         var stages = fluctuation == FluctuationCase.Case2 ? 1 : 2;
-        var means = snrRatios.Length <= OnStack ? stackalloc double[OnStack] : new double[snrRatios.Length];
-        means = means[..snrRatios.Length];
+        Span<double> means = snrRatios.Length <= OnStack ? stackalloc double[snrRatios.Length] : new double[snrRatios.Length];
         for (var i = 0; i < means.Length; i++)
         {
             DetectionArgument.NotNegative(snrRatios[i], nameof(snrRatios));

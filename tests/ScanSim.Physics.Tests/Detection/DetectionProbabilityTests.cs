@@ -34,6 +34,31 @@ public class DetectionProbabilityTests
     }
 
     [Fact]
+    public void Many_pulses_and_rare_or_frequent_false_alarms_agree_with_the_table()
+    {
+        var table = ReferenceTable.Load("detection_pd_wide.csv");
+        var absolute = new Comparison("Pd of all cases, n 1 to 4096, Pfa 1e-15 to 0.5", table.Source, 1e-12, 0);
+        var relative = new Comparison("Pd and miss of all cases, n 1 to 4096, Pfa 1e-15 to 0.5, relative in both tails", table.Source, 0, 5e-11);
+        foreach (var row in table.Rows)
+        {
+            var fluctuation = (FluctuationCase)table.Whole(row, "fluctuation_case");
+            var (pulses, threshold) = (table.Whole(row, "pulses"), table.Number(row, "threshold"));
+            var snrRatio = RelativeTail.Ratio(table.Number(row, "snr_db"));
+            var name = $"{fluctuation} n {pulses} Pfa {table.Text(row, "pfa")} S {table.Text(row, "snr_db")} dB";
+            var detect = DetectionProbability.Detect(fluctuation, pulses, snrRatio, threshold);
+            absolute.Add(name, table.Number(row, "pd"), detect);
+            relative.Add("Pd " + name, table.Number(row, "pd"), detect);
+            if (table.Text(row, "pmiss") != "nan")
+            {
+                relative.Add("miss " + name, table.Number(row, "pmiss"), DetectionProbability.Miss(fluctuation, pulses, snrRatio, threshold));
+            }
+        }
+
+        absolute.Conclude();
+        relative.Conclude();
+    }
+
+    [Fact]
     public void Cases_coincide_where_their_energies_do()
     {
         var comparison = new Comparison("Case 1 = case 2 and case 3 = case 4 at one pulse, case 3 = case 2 at two", "Swerling 1954", 0, 1e-12);

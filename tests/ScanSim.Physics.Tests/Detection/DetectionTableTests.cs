@@ -53,6 +53,24 @@ public class DetectionTableTests
     }
 
     [Fact]
+    public void Every_ordinary_and_odd_threshold_has_a_table()
+    {
+        foreach (var fluctuation in Enum.GetValues<FluctuationCase>())
+        {
+            foreach (var pulses in new[] { 1, 2, 3, 5, 30, 100, 500, 4096 })
+            {
+                foreach (var pfa in new[] { 0.99, 0.1, 1e-5, 1e-15, 1e-60 })
+                {
+                    var table = new DetectionTable(fluctuation, pulses, DetectionThreshold.FromFalseAlarm(pulses, pfa));
+                    Assert.InRange(table.Detect(1.0 / 3), pfa * (1 - 1e-9), 1);
+                }
+
+                Assert.Equal(1, new DetectionTable(fluctuation, pulses, 0).Detect(0.3));
+            }
+        }
+    }
+
+    [Fact]
     public void Reading_from_many_threads_gives_the_same_bits()
     {
         var table = new DetectionTable(FluctuationCase.Case3, 12, DetectionThreshold.FromFalseAlarm(12, 1e-5));
