@@ -6,7 +6,7 @@ namespace ScanSim.Physics.Detection;
 /// Σ_k w_k·Q(n+k, T) with w Poisson, negative binomial or binomial). Every form used here only adds positive numbers, and the smaller
 /// of detection and miss is the one computed, so both are accurate by themselves.
 /// Domain: pulses ≥ 1 (tested to 4096), mean SNR per pulse from 0 to 1e30 as a ratio, threshold ≥ 0 in units of the noise power of a sample,
-/// Q(n, T) above 1e-100. Accuracy: docs/physics/detection.md (1e-12 absolute and relative 1e-11 in both tails against 30-digit values).
+/// Q(n, T) above 1e-100. Accuracy: docs/physics/detection.md (1e-13 absolute and relative 1e-12 in both tails against 30-digit values).
 /// NaN in, NaN out; arguments outside the domain are an <see cref="ArgumentOutOfRangeException"/>.
 /// </remarks>
 public static class DetectionProbability

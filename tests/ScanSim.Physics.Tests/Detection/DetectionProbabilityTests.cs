@@ -17,7 +17,7 @@ public class DetectionProbabilityTests
     {
         var table = ReferenceTable.Load("detection_swerling_pd.csv");
         var absolute = new Comparison($"Pd of fluctuation case {number}", table.Source, 1e-12, 0);
-        var relative = new Comparison($"Pd and miss of fluctuation case {number}, relative in both tails", table.Source, RelativeTail.SmallestNormal, 5e-11);
+        var relative = new Comparison($"Pd and miss of fluctuation case {number}, relative in both tails", table.Source, RelativeTail.SmallestNormal, 2e-12);
         foreach (var row in table.Rows.Where(r => table.Whole(r, "fluctuation_case") == number))
         {
             var (pulses, threshold) = (table.Whole(row, "pulses"), table.Number(row, "threshold"));
@@ -38,7 +38,7 @@ public class DetectionProbabilityTests
     {
         var table = ReferenceTable.Load("detection_pd_wide.csv");
         var absolute = new Comparison("Pd of all cases, n 1 to 4096, Pfa 1e-15 to 0.5", table.Source, 1e-12, 0);
-        var relative = new Comparison("Pd and miss of all cases, n 1 to 4096, Pfa 1e-15 to 0.5, relative in both tails", table.Source, 0, 5e-11);
+        var relative = new Comparison("Pd and miss of all cases, n 1 to 4096, Pfa 1e-15 to 0.5, relative in both tails", table.Source, 0, 2e-12);
         foreach (var row in table.Rows)
         {
             var fluctuation = (FluctuationCase)table.Whole(row, "fluctuation_case");

@@ -34,12 +34,23 @@ internal static class PulseChain
         {
             logWeight += k == 0 ? 0 : Math.Log(mean / k);
             var weight = Math.Exp(logWeight);
-            detect += weight * state.AsSpan(0, stages.Count).ToArray().Sum();
+            detect += weight * Sum(state.AsSpan(0, stages.Count));
             miss += weight * state[stages.Count];
             Jump(stages, fastest, state);
         }
 
         return (detect, miss);
+    }
+
+    private static double Sum(ReadOnlySpan<double> values)
+    {
+        var sum = 0.0;
+        foreach (var value in values)
+        {
+            sum += value;
+        }
+
+        return sum;
     }
 
     private static void Jump(List<(double Rate, double SkipNext)> stages, double fastest, double[] state)
@@ -48,11 +59,6 @@ internal static class PulseChain
         {
             var moved = state[i] * (stages[i].Rate / fastest);
             state[i] -= moved;
-            if (stages[i].Rate == fastest)
-            {
-                state[i] = 0;
-            }
-
             state[i + 1] += moved * (1 - stages[i].SkipNext);
             state[Math.Min(i + 2, stages.Count)] += moved * stages[i].SkipNext;
         }
