@@ -11,9 +11,6 @@ namespace ScanSim.Physics.Detection;
 /// </remarks>
 public static class DetectionProbability
 {
-    /// <summary>300 dB: far above any echo; beyond it intermediate products could leave the range of doubles.</summary>
-    private const double GreatestSnrRatio = 1e30;
-
     /// <summary>Pd. <paramref name="snrRatio"/> is the mean SNR of each single pulse, not of the sum.</summary>
     public static double Detect(FluctuationCase fluctuation, int pulses, double snrRatio, double threshold)
     {
@@ -48,12 +45,8 @@ public static class DetectionProbability
     private static void Check(int pulses, double snrRatio, double threshold)
     {
         DetectionArgument.AtLeastOne(pulses, nameof(pulses));
-        DetectionArgument.NotNegative(snrRatio, nameof(snrRatio));
-        DetectionArgument.NotNegative(threshold, nameof(threshold));
-        if (snrRatio > GreatestSnrRatio || double.IsPositiveInfinity(threshold))
-        {
-            throw new ArgumentOutOfRangeException(nameof(snrRatio), $"SNR ratio {snrRatio:R} must be at most {GreatestSnrRatio} and the threshold {threshold:R} finite.");
-        }
+        DetectionArgument.Snr(snrRatio, nameof(snrRatio));
+        DetectionArgument.Threshold(threshold, nameof(threshold));
     }
 
     private static bool IsUpperSmaller(int pulses, double snrRatio, double threshold) => threshold > pulses * (1 + snrRatio);

@@ -28,6 +28,10 @@ public sealed class DetectionTable
     private readonly double segmentScale;
     private readonly Cubic[] segments;
 
+    /// <summary>Makes the table from some thousand exact values (1 to 30 ms).</summary>
+    /// <param name="fluctuation">How the target fluctuates.</param>
+    /// <param name="pulses">Number of pulses summed, 1 or more.</param>
+    /// <param name="threshold">Threshold on the sum in units of the noise power of a sample, as of <see cref="DetectionThreshold"/>.</param>
     public DetectionTable(FluctuationCase fluctuation, int pulses, double threshold)
     {
         Fluctuation = fluctuation;

@@ -9,7 +9,7 @@ public class MarcumQTests
     public void Q_and_its_complement_agree_with_the_table_in_both_tails()
     {
         var table = ReferenceTable.Load("detection_marcum_q.csv");
-        var comparison = new Comparison("Marcum Q and its complement, m 1 to 200, a and b 0 to 100", table.Source, RelativeTail.SmallestNormal, 1e-12);
+        var comparison = new Comparison("Marcum Q and its complement, m 1 to 200, a and b 0 to 100", table.Source, Scale.SmallestNormal, 1e-12);
         foreach (var row in table.Rows)
         {
             var (m, a, b) = (table.Whole(row, "m"), table.Number(row, "a"), table.Number(row, "b"));
