@@ -3,9 +3,10 @@ namespace ScanSim.Physics.Detection;
 /// <summary>Loss of a scanning Gaussian beam against n pulses at the beam's peak, n counted between the one-way half-power points.</summary>
 /// <remarks>
 /// Widths are in units of the one-way half-power beamwidth; the two-way power pattern is exp(−8·ln2·u²). Loss ratios are for one
-/// scanned coordinate; two coordinates multiply. Not to be mixed: the matched figure is [Barton1969]'s 1.24 dB, the uniform window that of [Blake1953], 1.6 dB. They are
-/// references for the exact treatment of unequal pulses in <see cref="UnequalPulses"/>, not factors of the radar equation here: the
-/// simulator weights each pulse by the pattern. NaN in, NaN out.
+/// scanned coordinate; two coordinates multiply. Not to be mixed: the matched figure is [Barton1988]'s 1.24 dB, the uniform window that
+/// of [Blake1969], 1.6 dB (both printed figures from memory; the integrals are exact). They are for comparison with published budgets,
+/// not factors of a budget whose pulses are weighted one by one (<see cref="UnequalPulses"/>). Accuracy: relative 1e-14.
+/// NaN in, NaN out; a negative width is an <see cref="ArgumentOutOfRangeException"/>.
 /// </remarks>
 public static class BeamShapeLoss
 {

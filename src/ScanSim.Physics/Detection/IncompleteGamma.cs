@@ -4,7 +4,7 @@ namespace ScanSim.Physics.Detection;
 /// <remarks>
 /// Sources: series [DLMF] 8.7.1 below x = a + 1; above it the finite sum [DLMF] 8.4.10 for whole a, otherwise the continued fraction
 /// [DLMF] 8.9.2 evaluated by Lentz's method. Domain: a &gt; 0, x ≥ 0, infinite x allowed; the number of terms grows with √a.
-/// Accuracy: see docs/physics/detection.md (relative 1e-12 or better down to 1e-300 against 30-digit values, a from 0.5 to 4096);
+/// Accuracy: see docs/physics/detection.md (relative 2e-13 down to 1e-300 against 50-digit values, a from 0.5 to 4096);
 /// for a below 0.5 and x below 1, Q is 1 − P and its error is absolute (2⁻⁵²).
 /// NaN in, NaN out; arguments outside the domain are an <see cref="ArgumentOutOfRangeException"/>.
 /// </remarks>

@@ -8,12 +8,12 @@ namespace ScanSim.Physics.Detection;
 /// the sum the negative saddle gives the probability of a miss, above it the positive one gives that of detection, so the result is the
 /// smaller tail with relative accuracy. The parabola follows the path of steepest descent of M·exp(−tT) alone: bent after the pole at 0
 /// as well, it would run to where M grows when there are many pulses. The trapezoidal rule converges geometrically because the poles next
-/// to the saddle lie at least one width 1/√φ'' away ([TrefethenWeideman2014]); the step of 0.35 widths leaves exp(−2π/0.35) = 2e-8.
+/// to the saddle lie at least one width 1/√φ'' away ([TrefethenWeideman2014]); the step of 0.4 widths leaves exp(−2π/0.4) = 2e-7 of the part of a single pole, in practice 1e-9 of the tail.
 /// </remarks>
 internal readonly ref struct SaddlePoint
 {
-    private const double StepInWidths = 0.35;
-    private const double Negligible = 1e-11;
+    private const double StepInWidths = 0.4;
+    private const double Negligible = 1e-10;
     private const int BlockCap = 400;
 
     private readonly int stages;

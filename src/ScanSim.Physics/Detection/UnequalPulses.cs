@@ -5,8 +5,9 @@ namespace ScanSim.Physics.Detection;
 /// The tail of the sum is (1/2πi)∫ M(t)·exp(−t·T)/t dt with M the product of the pulses' moment generating functions, 1/(1−(1+S)t) for
 /// case 2 and (1−t)/(1−(1+S/2)t)² for case 4 ([Swerling1954]). It is integrated numerically along a parabola through the saddle point
 /// ([Rice1980], [Helstrom1978]); in contrast to the one-term saddle-point formula of [LugannaniRice1980] this converges to the exact value.
-/// Domain: 1 or more pulses, SNR ≥ 0, threshold ≥ 0 in units of the noise power of a sample. Accuracy: see docs/physics/detection.md,
-/// relative 1e-7 of the smaller of detection and miss, measured against the exact Markov-chain sum of the tests.
+/// Domain: 1 or more pulses, SNR from 0 to 1e30, threshold ≥ 0 in units of the noise power of a sample. Accuracy: 1e-9 absolute and 1e-8
+/// relative in both tails, measured against an exact sum of positive terms (the tests' chain of exponential stages) for 2 to 64 pulses over
+/// ±1 beamwidth of a Gaussian beam, Pfa 1e-3 to 1e-8, peak SNR −20 to 40 dB; one pulse is exact. About 0.5 µs for 15 pulses, 1.7 µs for 64.
 /// For the other cases the exact value follows from the mean of the SNRs and <see cref="DetectionProbability"/>.
 /// No allocation up to 512 pulses. NaN in, NaN out; arguments outside the domain are an <see cref="ArgumentException"/>.
 /// </remarks>
@@ -33,11 +34,10 @@ public static class UnequalPulses
         }
 
         var stages = fluctuation == FluctuationCase.Case2 ? 1 : 2;
-        var means = snrRatios.Length <= OnStack ? stackalloc double[OnStack] : new double[snrRatios.Length];
-        means = means[..snrRatios.Length];
+        Span<double> means = snrRatios.Length <= OnStack ? stackalloc double[snrRatios.Length] : new double[snrRatios.Length];
         for (var i = 0; i < means.Length; i++)
         {
-            DetectionArgument.NotNegative(snrRatios[i], nameof(snrRatios));
+            DetectionArgument.Snr(snrRatios[i], nameof(snrRatios));
             means[i] = 1 + snrRatios[i] / stages;
         }
 
@@ -64,6 +64,6 @@ public static class UnequalPulses
             throw new ArgumentException("There are no pulses; at least one SNR is needed.", nameof(snrRatios));
         }
 
-        DetectionArgument.NotNegative(threshold, nameof(threshold));
+        DetectionArgument.Threshold(threshold, nameof(threshold));
     }
 }

@@ -24,8 +24,8 @@ public class BeamShapeLossTests
 
         exact.Conclude();
         var published = new Comparison("Beam-shape loss as printed: 1.24 dB matched, 1.6 dB uniform window", "Barton 1988; Blake 1969 (both from memory)", 0.05, 0, "dB");
-        published.Add("matched", 1.24, RelativeTail.Db(BeamShapeLoss.DenseMatchedRatio));
-        published.Add("uniform", 1.6, RelativeTail.Db(BeamShapeLoss.UniformWindowRatio(BeamShapeLoss.OptimumWindowBeamwidths)));
+        published.Add("matched", 1.24, Scale.Db(BeamShapeLoss.DenseMatchedRatio));
+        published.Add("uniform", 1.6, Scale.Db(BeamShapeLoss.UniformWindowRatio(BeamShapeLoss.OptimumWindowBeamwidths)));
         published.Conclude();
     }
 

@@ -17,16 +17,41 @@ public class DetectionProbabilityTests
     {
         var table = ReferenceTable.Load("detection_swerling_pd.csv");
         var absolute = new Comparison($"Pd of fluctuation case {number}", table.Source, 1e-12, 0);
-        var relative = new Comparison($"Pd and miss of fluctuation case {number}, relative in both tails", table.Source, RelativeTail.SmallestNormal, 5e-11);
+        var relative = new Comparison($"Pd and miss of fluctuation case {number}, relative in both tails", table.Source, Scale.SmallestNormal, 2e-12);
         foreach (var row in table.Rows.Where(r => table.Whole(r, "fluctuation_case") == number))
         {
             var (pulses, threshold) = (table.Whole(row, "pulses"), table.Number(row, "threshold"));
-            var snrRatio = RelativeTail.Ratio(table.Number(row, "snr_db"));
+            var snrRatio = Scale.Ratio(table.Number(row, "snr_db"));
             var name = $"n {pulses} Pfa {table.Text(row, "pfa")} S {table.Text(row, "snr_db")} dB";
             var detect = DetectionProbability.Detect((FluctuationCase)number, pulses, snrRatio, threshold);
             absolute.Add(name, table.Number(row, "pd"), detect);
             relative.Add("Pd " + name, table.Number(row, "pd"), detect);
             relative.Add("miss " + name, table.Number(row, "pmiss"), DetectionProbability.Miss((FluctuationCase)number, pulses, snrRatio, threshold));
+        }
+
+        absolute.Conclude();
+        relative.Conclude();
+    }
+
+    [Fact]
+    public void Many_pulses_and_rare_or_frequent_false_alarms_agree_with_the_table()
+    {
+        var table = ReferenceTable.Load("detection_pd_wide.csv");
+        var absolute = new Comparison("Pd of all cases, n 1 to 4096, Pfa 1e-15 to 0.5", table.Source, 1e-12, 0);
+        var relative = new Comparison("Pd and miss of all cases, n 1 to 4096, Pfa 1e-15 to 0.5, relative in both tails", table.Source, 0, 2e-12);
+        foreach (var row in table.Rows)
+        {
+            var fluctuation = (FluctuationCase)table.Whole(row, "fluctuation_case");
+            var (pulses, threshold) = (table.Whole(row, "pulses"), table.Number(row, "threshold"));
+            var snrRatio = Scale.Ratio(table.Number(row, "snr_db"));
+            var name = $"{fluctuation} n {pulses} Pfa {table.Text(row, "pfa")} S {table.Text(row, "snr_db")} dB";
+            var detect = DetectionProbability.Detect(fluctuation, pulses, snrRatio, threshold);
+            absolute.Add(name, table.Number(row, "pd"), detect);
+            relative.Add("Pd " + name, table.Number(row, "pd"), detect);
+            if (table.Text(row, "pmiss") != "nan")
+            {
+                relative.Add("miss " + name, table.Number(row, "pmiss"), DetectionProbability.Miss(fluctuation, pulses, snrRatio, threshold));
+            }
         }
 
         absolute.Conclude();
@@ -46,7 +71,7 @@ public class DetectionProbabilityTests
         {
             for (var db = -40; db <= 60; db += 5)
             {
-                var snrRatio = RelativeTail.Ratio(db);
+                var snrRatio = Scale.Ratio(db);
                 comparison.Add($"Pd {one} {other} {db} dB", DetectionProbability.Detect(one, pulses, snrRatio, 16), DetectionProbability.Detect(other, pulses, snrRatio, 16));
                 comparison.Add($"miss {one} {other} {db} dB", DetectionProbability.Miss(one, pulses, snrRatio, 16), DetectionProbability.Miss(other, pulses, snrRatio, 16));
             }
@@ -64,7 +89,7 @@ public class DetectionProbabilityTests
             var threshold = DetectionThreshold.FromFalseAlarm(pulses, 1e-6);
             for (var db = 0; db <= 30; db += 3)
             {
-                var snrRatio = RelativeTail.Ratio(db);
+                var snrRatio = Scale.Ratio(db);
                 comparison.Add($"case 1, n {pulses}, {db} dB", ClosedCase1(pulses, snrRatio, threshold), DetectionProbability.Detect(FluctuationCase.Case1, pulses, snrRatio, threshold));
                 comparison.Add($"case 3, n {pulses}, {db} dB", ClosedCase3(pulses, snrRatio, threshold), DetectionProbability.Detect(FluctuationCase.Case3, pulses, snrRatio, threshold));
             }
@@ -119,8 +144,8 @@ public class DetectionProbabilityTests
                     var last = DetectionProbability.Detect(fluctuation, pulses, 0, threshold);
                     for (var db = -120.0; db <= 120; db += 2.5)
                     {
-                        var detect = DetectionProbability.Detect(fluctuation, pulses, RelativeTail.Ratio(db), threshold);
-                        var miss = DetectionProbability.Miss(fluctuation, pulses, RelativeTail.Ratio(db), threshold);
+                        var detect = DetectionProbability.Detect(fluctuation, pulses, Scale.Ratio(db), threshold);
+                        var miss = DetectionProbability.Miss(fluctuation, pulses, Scale.Ratio(db), threshold);
                         Assert.True(detect >= last * (1 - 1e-10), $"{fluctuation} n {pulses} Pfa {pfa} {db} dB: {last:R} then {detect:R}");
                         Assert.Equal(1, detect + miss, 1e-14);
                         Assert.InRange(miss, 0, 1);

@@ -23,7 +23,7 @@ public class DetectionTableTests
             // A step of 0.0777 dB is in no ratio to octaves or their parts.
             for (var db = -100.0; db < 120; db += 0.0777)
             {
-                var snrRatio = RelativeTail.Ratio(db);
+                var snrRatio = Scale.Ratio(db);
                 var exact = DetectionProbability.Detect(fluctuation, pulses, snrRatio, threshold);
                 var name = $"n {pulses} Pfa {pfa} S {db:0.0000} dB";
                 absolute.Add(name, exact, table.Detect(snrRatio));
@@ -53,10 +53,28 @@ public class DetectionTableTests
     }
 
     [Fact]
+    public void Every_ordinary_and_odd_threshold_has_a_table()
+    {
+        foreach (var fluctuation in Enum.GetValues<FluctuationCase>())
+        {
+            foreach (var pulses in new[] { 1, 2, 3, 5, 30, 100, 500, 4096 })
+            {
+                foreach (var pfa in new[] { 0.99, 0.1, 1e-5, 1e-15, 1e-60 })
+                {
+                    var table = new DetectionTable(fluctuation, pulses, DetectionThreshold.FromFalseAlarm(pulses, pfa));
+                    Assert.InRange(table.Detect(1.0 / 3), pfa * (1 - 1e-9), 1);
+                }
+
+                Assert.Equal(1, new DetectionTable(fluctuation, pulses, 0).Detect(0.3));
+            }
+        }
+    }
+
+    [Fact]
     public void Reading_from_many_threads_gives_the_same_bits()
     {
         var table = new DetectionTable(FluctuationCase.Case3, 12, DetectionThreshold.FromFalseAlarm(12, 1e-5));
-        var snrRatios = Enumerable.Range(0, 20_000).Select(i => RelativeTail.Ratio(-40 + i * 0.005)).ToArray();
+        var snrRatios = Enumerable.Range(0, 20_000).Select(i => Scale.Ratio(-40 + i * 0.005)).ToArray();
         var alone = snrRatios.Select(table.Detect).ToArray();
         var together = new double[snrRatios.Length];
         Parallel.For(0, snrRatios.Length, new ParallelOptions { MaxDegreeOfParallelism = 8 }, i => together[i] = table.Detect(snrRatios[i]));

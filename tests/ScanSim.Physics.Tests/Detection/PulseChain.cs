@@ -28,17 +28,29 @@ internal static class PulseChain
         var mean = fastest * threshold;
         var state = new double[stages.Count + 2];
         state[0] = 1;
-        double detect = 0, miss = 0;
+        double detect = 0, miss = 0, logWeight = -mean;
         var last = (int)(mean + 40 * Math.Sqrt(mean) + 200 + 8 * stages.Count);
         for (var k = 0; k <= last; k++)
         {
-            var weight = Poisson(k, mean);
-            detect += weight * state.Take(stages.Count).Sum();
+            logWeight += k == 0 ? 0 : Math.Log(mean / k);
+            var weight = Math.Exp(logWeight);
+            detect += weight * Sum(state.AsSpan(0, stages.Count));
             miss += weight * state[stages.Count];
             Jump(stages, fastest, state);
         }
 
         return (detect, miss);
+    }
+
+    private static double Sum(ReadOnlySpan<double> values)
+    {
+        var sum = 0.0;
+        foreach (var value in values)
+        {
+            sum += value;
+        }
+
+        return sum;
     }
 
     private static void Jump(List<(double Rate, double SkipNext)> stages, double fastest, double[] state)
@@ -47,24 +59,8 @@ internal static class PulseChain
         {
             var moved = state[i] * (stages[i].Rate / fastest);
             state[i] -= moved;
-            if (stages[i].Rate == fastest)
-            {
-                state[i] = 0;
-            }
-
             state[i + 1] += moved * (1 - stages[i].SkipNext);
             state[Math.Min(i + 2, stages.Count)] += moved * stages[i].SkipNext;
         }
-    }
-
-    private static double Poisson(int k, double mean)
-    {
-        var log = -mean;
-        for (var j = 1; j <= k; j++)
-        {
-            log += Math.Log(mean / j);
-        }
-
-        return Math.Exp(log);
     }
 }

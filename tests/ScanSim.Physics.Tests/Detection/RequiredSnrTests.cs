@@ -14,7 +14,7 @@ public class RequiredSnrTests
         {
             var fluctuation = (FluctuationCase)table.Whole(row, "fluctuation_case");
             var (pulses, pfa, pd) = (table.Whole(row, "pulses"), table.Number(row, "pfa"), table.Number(row, "pd"));
-            comparison.Add($"{fluctuation} n {pulses} Pfa {pfa} Pd {pd}", table.Number(row, "required_snr_db"), RelativeTail.Db(RequiredSnr.Ratio(fluctuation, pulses, pfa, pd)));
+            comparison.Add($"{fluctuation} n {pulses} Pfa {pfa} Pd {pd}", table.Number(row, "required_snr_db"), Scale.Db(RequiredSnr.Ratio(fluctuation, pulses, pfa, pd)));
         }
 
         comparison.Conclude();
@@ -30,7 +30,7 @@ public class RequiredSnrTests
             var where = table.Text(row, "where");
             var comparison = new Comparison($"Required SNR, steady target, n {pulses} Pfa {pfa:0.##E+0} Pd {pd}: {where}", $"{where} ({table.Text(row, "status")})", table.Number(row, "tolerance_db"), 0, "dB");
             var ratio = RequiredSnr.Ratio((FluctuationCase)table.Whole(row, "fluctuation_case"), pulses, pfa, pd);
-            comparison.Add(where, table.Number(row, "published_snr_db"), RelativeTail.Db(ratio));
+            comparison.Add(where, table.Number(row, "published_snr_db"), Scale.Db(ratio));
             comparison.Conclude();
         }
     }
@@ -64,7 +64,7 @@ public class RequiredSnrTests
         {
             var (pulses, pfa, pd) = (table.Whole(row, "pulses"), table.Number(row, "pfa"), table.Number(row, "pd"));
             var name = $"n {pulses} Pfa {pfa} Pd {pd}";
-            var ours = RelativeTail.Db(RequiredSnr.Ratio(FluctuationCase.Steady, pulses, pfa, pd));
+            var ours = Scale.Db(RequiredSnr.Ratio(FluctuationCase.Steady, pulses, pfa, pd));
             formula.Add(name, table.Number(row, "linear_snr_db"), AlbersheimDb(pulses, pfa, pd));
             square.Add(name, AlbersheimDb(pulses, pfa, pd), ours);
             exact.Add(name, table.Number(row, "square_law_snr_db"), ours);

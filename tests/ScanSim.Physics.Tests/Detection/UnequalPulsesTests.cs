@@ -12,7 +12,7 @@ public class UnequalPulsesTests
     {
         const string Source = "Uniformized chain of exponential stages (Jensen 1953), all terms positive";
         var absolute = new Comparison($"Pd of unequal pulses, {fluctuation}, Gaussian two-way beam", Source, 1e-9, 0);
-        var relative = new Comparison($"Pd and miss of unequal pulses, {fluctuation}, relative in both tails", Source, 0, 1e-6);
+        var relative = new Comparison($"Pd and miss of unequal pulses, {fluctuation}, relative in both tails", Source, 0, 1e-8);
         foreach (var pulses in new[] { 2, 3, 4, 7, 15, 32, 64 })
         {
             foreach (var pfa in new[] { 1e-3, 1e-5, 1e-8 })
@@ -20,7 +20,7 @@ public class UnequalPulsesTests
                 var threshold = DetectionThreshold.FromFalseAlarm(pulses, pfa);
                 for (var db = -20; db <= 40; db += 4)
                 {
-                    var snrRatios = GaussianBeam(pulses, RelativeTail.Ratio(db), shift: 0.07);
+                    var snrRatios = GaussianBeam(pulses, Scale.Ratio(db), shift: 0.07);
                     var (detect, miss) = PulseChain.Tails(fluctuation == FluctuationCase.Case4, snrRatios, threshold);
                     var name = $"n {pulses} Pfa {pfa} peak {db} dB";
                     absolute.Add(name, detect, UnequalPulses.Detect(fluctuation, snrRatios, threshold));
@@ -40,14 +40,38 @@ public class UnequalPulsesTests
     public void Equal_pulses_agree_with_the_table_of_equal_pulses(FluctuationCase fluctuation)
     {
         var table = ReferenceTable.Load("detection_swerling_pd.csv");
-        var comparison = new Comparison($"Equal pulses as a special case of unequal ones, {fluctuation}, in both tails", table.Source, RelativeTail.SmallestNormal, 1e-6);
+        var comparison = new Comparison($"Equal pulses as a special case of unequal ones, {fluctuation}, in both tails", table.Source, Scale.SmallestNormal, 1e-8);
         foreach (var row in table.Rows.Where(r => table.Whole(r, "fluctuation_case") == (int)fluctuation))
         {
             var threshold = table.Number(row, "threshold");
-            var snrRatios = Enumerable.Repeat(RelativeTail.Ratio(table.Number(row, "snr_db")), table.Whole(row, "pulses")).ToArray();
+            var snrRatios = Enumerable.Repeat(Scale.Ratio(table.Number(row, "snr_db")), table.Whole(row, "pulses")).ToArray();
             var name = $"n {snrRatios.Length} Pfa {table.Text(row, "pfa")} S {table.Text(row, "snr_db")} dB";
             comparison.Add("Pd " + name, table.Number(row, "pd"), UnequalPulses.Detect(fluctuation, snrRatios, threshold));
             comparison.Add("miss " + name, table.Number(row, "pmiss"), UnequalPulses.Miss(fluctuation, snrRatios, threshold));
+        }
+
+        comparison.Conclude();
+    }
+
+    [Theory]
+    [InlineData(FluctuationCase.Case2)]
+    [InlineData(FluctuationCase.Case4)]
+    public void Pulses_of_any_snr_in_any_order_agree_with_the_exact_chain(FluctuationCase fluctuation)
+    {
+        var comparison = new Comparison($"Pd and miss of pulses with SNRs strewn over 60 dB, {fluctuation}", "Uniformized chain of exponential stages (Jensen 1953), all terms positive", 0, 1e-8);
+        for (var sample = 0; sample < 120; sample++)
+        {
+            var pulses = 2 + sample % 19;
+            var snrRatios = new double[pulses];
+            for (var i = 0; i < pulses; i++)
+            {
+                snrRatios[i] = Scale.Ratio(60 * ((sample * 20 + i) * 0.6180339887498949 % 1) - 40 + 20 * (sample * 0.7548776662466927 % 1));
+            }
+
+            var threshold = DetectionThreshold.FromFalseAlarm(pulses, Math.Pow(10, -1 - 11 * (sample * 0.5698402909980532 % 1)));
+            var (detect, miss) = PulseChain.Tails(fluctuation == FluctuationCase.Case4, snrRatios, threshold);
+            comparison.Add($"Pd, sample {sample}", detect, UnequalPulses.Detect(fluctuation, snrRatios, threshold));
+            comparison.Add($"miss, sample {sample}", miss, UnequalPulses.Miss(fluctuation, snrRatios, threshold));
         }
 
         comparison.Conclude();
@@ -57,7 +81,7 @@ public class UnequalPulsesTests
     public void Two_very_different_pulses_follow_the_closed_form()
     {
         // P(z > T) = (c1·exp(−T/c1) − c2·exp(−T/c2))/(c1 − c2) for two exponentials of means c1 and c2.
-        var comparison = new Comparison("Two pulses of different SNR, case 2", "Sum of two exponentials, closed form", 0, 1e-7);
+        var comparison = new Comparison("Two pulses of different SNR, case 2", "Sum of two exponentials, closed form", 0, 1e-8);
         foreach (var (s1, s2) in new[] { (0.0, 1.0), (0.0, 1e6), (3.0, 30.0), (100.0, 1e4) })
         {
             for (var threshold = 0.5; threshold < 60; threshold *= 1.7)
@@ -106,7 +130,7 @@ public class UnequalPulsesTests
                 {
                     foreach (var threshold in new[] { 0, 1e-9, 1, 50, 5000, 1e6 })
                     {
-                        var snrRatios = GaussianBeam(pulses, RelativeTail.Ratio(db), shift: 0);
+                        var snrRatios = GaussianBeam(pulses, Scale.Ratio(db), shift: 0);
                         var detect = UnequalPulses.Detect(fluctuation, snrRatios, threshold);
                         Assert.InRange(detect, 0, 1);
                         Assert.Equal(1, detect + UnequalPulses.Miss(fluctuation, snrRatios, threshold), 1e-15);
@@ -138,6 +162,8 @@ public class UnequalPulsesTests
         Assert.Throws<ArgumentException>(() => UnequalPulses.Detect(FluctuationCase.Case2, [], 10));
         Assert.Throws<ArgumentOutOfRangeException>(() => UnequalPulses.Detect(FluctuationCase.Case1, [1, 2], 10));
         Assert.Throws<ArgumentOutOfRangeException>(() => UnequalPulses.Detect(FluctuationCase.Case2, [1, -2], 10));
+        Assert.Throws<ArgumentOutOfRangeException>(() => UnequalPulses.Detect(FluctuationCase.Case2, [1, double.PositiveInfinity], 10));
+        Assert.Throws<ArgumentOutOfRangeException>(() => UnequalPulses.Detect(FluctuationCase.Case2, [1, 2], double.PositiveInfinity));
     }
 
     /// <summary>SNRs of pulses spread over ±1 beamwidth of a Gaussian beam, two-way power exp(−8·ln2·u²).</summary>
