@@ -8,9 +8,11 @@ internal sealed class TimelineView
     /// <summary>What the timeline needs below its rows.</summary>
     public const float AxisHeight = 26;
 
+    /// <summary>Kept at the right for the blip-scan ratio.</summary>
+    public const float ShareWidth = 62;
+
     /// <summary>Narrower scans are gathered in columns.</summary>
     private const float LeastMarkPx = 7;
-    private const float ShareWidth = 62;
     private const float MostLabelWidth = 150;
 
     private readonly Sheet sheet;
