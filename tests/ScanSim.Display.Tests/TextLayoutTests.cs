@@ -76,6 +76,20 @@ public sealed partial class TextLayoutTests
         Assert.Equal(picture.Layout.ShownTargets, rows);
     }
 
+    [Theory]
+    [InlineData(800, 600)]
+    [InlineData(1280, 900)]
+    [InlineData(1920, 1080)]
+    public void Eight_targets_keep_all_their_labels(int widthPx, int heightPx)
+    {
+        var scene = SceneMaking.Scene(8);
+        using var picture = PaintedPicture.Of(scene, new ViewOptions(), 203, new PictureSize(widthPx, heightPx));
+        foreach (var target in scene.Targets)
+        {
+            Assert.Contains(picture.Texts, t => t.Text == target.Id && picture.Layout.Plan.Contains(t.Box));
+        }
+    }
+
     [Fact]
     public void The_picture_says_what_it_shows_and_with_what_caution()
     {

@@ -80,9 +80,9 @@ internal sealed class TimelineView
         }
 
         var r = Math.Min(Math.Min(ScanPx - 1.5f, rowHeight - 5) / 2, 5.5f);
-        foreach (var look in target.Looks)
+        foreach (var marks in target.Looks.GroupBy(look => look.Outcome))
         {
-            Glyphs.Outcome(sheet, look.Outcome, new SKPoint(X(look.TimeS), row.MidY), r);
+            Glyphs.Outcomes(sheet, marks.Key, [.. marks.Select(look => new SKPoint(X(look.TimeS), row.MidY))], r);
         }
     }
 
