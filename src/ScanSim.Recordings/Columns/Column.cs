@@ -17,6 +17,9 @@ internal abstract class Column(int index, string name, string? unit, string desc
 
     public JsonEncodedText JsonName { get; } = JsonEncodedText.Encode(name);
 
+    /// <summary>Whether time spans are selected by this column.</summary>
+    public bool IsTime { get; } = string.Equals(name, "time_s", StringComparison.Ordinal);
+
     /// <summary>Type as the manifest names it.</summary>
     public abstract string Type { get; }
 

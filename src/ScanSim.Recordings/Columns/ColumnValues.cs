@@ -16,7 +16,7 @@ internal abstract class ColumnValues(Column column)
     /// <summary>The column as a Parquet schema declares it.</summary>
     public abstract DataField Field { get; }
 
-    /// <summary>Encoding that measured smallest and fastest for this type with zstd at its fastest level.</summary>
+    /// <summary>Encoding in Parquet: what measured smallest for this type with zstd at its fastest level.</summary>
     public abstract EncodingHint Encoding { get; }
 
     public virtual void Clear() => Count = 0;

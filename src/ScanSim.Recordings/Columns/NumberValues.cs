@@ -11,7 +11,8 @@ internal sealed class NumberValues(Column column) : ColumnValues<double>(column)
 {
     public override DataField Field => new DataField<double>(Column.Name, nullable: false);
 
-    public override EncodingHint Encoding => EncodingHint.ByteSplitStream;
+    /// <summary>Plain for times: the library (6.1.0) writes least and greatest value, by which a span is found, with plain doubles only.</summary>
+    public override EncodingHint Encoding => Column.IsTime ? EncodingHint.Default : EncodingHint.ByteSplitStream;
 
     public override void Check(string table, long firstRow)
     {

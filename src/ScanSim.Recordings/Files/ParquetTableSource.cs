@@ -10,7 +10,7 @@ internal sealed class ParquetTableSource : ITableSource
 {
     private readonly ParquetReader reader;
     private readonly ImmutableArray<DataField> fields;
-    private readonly DataField? time;
+    private readonly Column? time;
     private readonly TimeSpanS span;
     private readonly long mostRows;
     private int next;
@@ -25,7 +25,7 @@ internal sealed class ParquetTableSource : ITableSource
     {
         reader = ParquetReader.CreateAsync(stream, leaveStreamOpen: true).GetAwaiter().GetResult();
         fields = [.. columns.Select(Find)];
-        time = timeColumn is null ? null : fields[timeColumn.Index];
+        time = timeColumn;
         this.span = span;
         this.mostRows = mostRows;
     }
@@ -62,14 +62,33 @@ internal sealed class ParquetTableSource : ITableSource
             block[i].ReadAsync(group, fields[i], (int)group.RowCount).AsTask().GetAwaiter().GetResult();
         }
 
+        if (StatedTimes(group) is { } stated)
+        {
+            Check(stated, (ColumnValues<double>)block[time!.Index]);
+        }
+
         GroupsRead++;
     }
 
+    /// <summary>Times outside the stated ones would be missed when a span is read, so they are a fault even where they do no harm.</summary>
+    private static void Check(TimeSpanS stated, ColumnValues<double> times)
+    {
+        for (var row = 0; row < times.Count; row++)
+        {
+            if (!stated.Contains(times[row]))
+            {
+                throw new FormatException($"a row group states times from {stated.FromS} to {stated.ToS} s and holds {times[row]} s");
+            }
+        }
+    }
+
     private bool IsWanted(ParquetRowGroupReader group) =>
-        time is null
-        || span.IsEverything
-        || group.GetStatistics(time) is not { MinValue: double first, MaxValue: double last }
-        || span.Overlaps(first, last);
+        span.IsEverything || StatedTimes(group) is not { } stated || span.Overlaps(stated.FromS, stated.ToS);
+
+    private TimeSpanS? StatedTimes(ParquetRowGroupReader group) =>
+        time is not null && group.GetStatistics(fields[time.Index]) is { MinValue: double first, MaxValue: double last }
+            ? new TimeSpanS(first, last)
+            : null;
 
     private DataField Find(Column column)
     {

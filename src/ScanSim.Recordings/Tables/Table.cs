@@ -13,7 +13,7 @@ internal abstract class Table(string name, string rowMeaning)
     public abstract ImmutableArray<Column> Columns { get; }
 
     /// <summary>Column by which a time span is selected; null if the table has none.</summary>
-    public Column? TimeColumn => Columns.FirstOrDefault(column => string.Equals(column.Name, "time_s", StringComparison.Ordinal));
+    public Column? TimeColumn => Columns.FirstOrDefault(column => column.IsTime);
 
     public ColumnBlock CreateBlock() => new(Columns);
 }

@@ -78,6 +78,7 @@ internal sealed class TableWriter<TRow> : IDisposable
     public void Dispose()
     {
         digest.Dispose();
+        (file as IDisposable)?.Dispose();
         try
         {
             stream.Dispose();
