@@ -1,3 +1,4 @@
+using System.Text;
 using ScanSim.Display.Painting;
 using SkiaSharp;
 
@@ -58,8 +59,14 @@ public static class Picture
 
     private static void Svg(Scene scene, ViewOptions view, double timeS, PictureSize size, Stream into)
     {
-        using var canvas = SKSvgCanvas.Create(SKRect.Create(size.WidthPx, size.HeightPx), into);
-        new Painter(scene) { ForSvg = true }.Paint(canvas, size, view, timeS);
+        using var drawn = new MemoryStream();
+        using (var canvas = SKSvgCanvas.Create(SKRect.Create(size.WidthPx, size.HeightPx), drawn))
+        {
+            new Painter(scene) { ForSvg = true }.Paint(canvas, size, view, timeS);
+        }
+
+        var svg = SvgEnvelope.Finish(Encoding.UTF8.GetString(drawn.ToArray()), scene.ScenarioName, size);
+        into.Write(Encoding.UTF8.GetBytes(svg));
     }
 
     private static void Pdf(Scene scene, ViewOptions view, double timeS, PictureSize size, Stream into)

@@ -23,6 +23,12 @@ public sealed class SceneBuilder : IRecordingSink
         }
     }
 
+    /// <summary>Plots before this time count in the timeline but are not kept for the plan.</summary>
+    public double PlotsFromS { get; init; } = double.NegativeInfinity;
+
+    /// <summary>Plots after this time count in the timeline but are not kept for the plan.</summary>
+    public double PlotsToS { get; init; } = double.PositiveInfinity;
+
     public void AddScan(in ScanRow row) => scans.Add(row);
 
     public void AddLooks(ReadOnlySpan<LookRow> rows)
@@ -43,8 +49,12 @@ public sealed class SceneBuilder : IRecordingSink
     {
         foreach (ref readonly var row in rows)
         {
-            var (sin, cos) = Math.SinCos(row.AzimuthDeg * (Math.PI / 180));
-            plots.Add(new PlotMark(row.TimeS, row.Scan, (float)(row.RangeM * sin), (float)(row.RangeM * cos), row.Kind));
+            if (row.TimeS >= PlotsFromS && row.TimeS <= PlotsToS)
+            {
+                var (sin, cos) = Math.SinCos(row.AzimuthDeg * (Math.PI / 180));
+                plots.Add(new PlotMark(row.TimeS, row.Scan, (float)(row.RangeM * sin), (float)(row.RangeM * cos), row.Kind));
+            }
+
             if (row.Kind == EchoKind.Target)
             {
                 foreach (var id in row.Target.Split('+'))

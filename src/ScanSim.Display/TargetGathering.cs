@@ -8,7 +8,7 @@ namespace ScanSim.Display;
 internal sealed class TargetGathering(Target target)
 {
     private readonly List<TruthMark> truth = [];
-    private readonly List<LookMark> looks = [];
+    private readonly Dictionary<int, LookMark> looks = [];
     private readonly HashSet<int> scansWithPlot = [];
 
     public void Add(in TruthRow row)
@@ -22,16 +22,9 @@ internal sealed class TargetGathering(Target target)
     public void Add(in LookRow row)
     {
         var mark = new LookMark(row.TimeS, row.Scan, (float)row.SnrDb, OutcomeOf(row));
-        if (looks.Count == 0 || looks[^1].Scan != mark.Scan)
+        if (!looks.TryGetValue(mark.Scan, out var known) || IsBetter(mark, known))
         {
-            looks.Add(mark);
-            return;
-        }
-
-        var (isDetected, wasDetected) = (mark.Outcome == LookOutcome.Detected, looks[^1].Outcome == LookOutcome.Detected);
-        if (isDetected == wasDetected ? mark.SnrDb > looks[^1].SnrDb : isDetected)
-        {
-            looks[^1] = mark;
+            looks[mark.Scan] = mark;
         }
     }
 
@@ -39,13 +32,14 @@ internal sealed class TargetGathering(Target target)
 
     public SceneTarget Build(bool recordingHasLooks)
     {
-        var lookOfScan = looks.ToDictionary(l => l.Scan);
+        var looksWithoutTruth = new HashSet<int>(looks.Keys);
         var marks = ImmutableArray.CreateBuilder<LookMark>(truth.Count);
         var inView = 0;
         var withPlot = 0;
         foreach (var t in truth)
         {
-            var looked = lookOfScan.Remove(t.Scan, out var look);
+            var looked = looks.TryGetValue(t.Scan, out var look);
+            looksWithoutTruth.Remove(t.Scan);
             marks.Add(looked ? look : new LookMark(t.TimeS, t.Scan, float.NaN, WithoutLook(t, recordingHasLooks)));
             if (t.View == TargetView.InView || looked)
             {
@@ -55,7 +49,7 @@ internal sealed class TargetGathering(Target target)
         }
 
         // A look in a scan whose truth row lies beyond the track's end, for instance.
-        marks.AddRange(lookOfScan.Values);
+        marks.AddRange(looksWithoutTruth.Select(scan => looks[scan]));
         marks.Sort(static (a, b) => a.TimeS.CompareTo(b.TimeS));
         return new SceneTarget
         {
@@ -76,6 +70,12 @@ internal sealed class TargetGathering(Target target)
         }
 
         return scansWithPlot.Contains(mark.Scan) ? LookOutcome.Detected : LookOutcome.MissedUnrecorded;
+    }
+
+    private static bool IsBetter(in LookMark mark, in LookMark known)
+    {
+        var (isDetected, wasDetected) = (mark.Outcome == LookOutcome.Detected, known.Outcome == LookOutcome.Detected);
+        return isDetected == wasDetected ? mark.SnrDb > known.SnrDb : isDetected;
     }
 
     private static LookOutcome OutcomeOf(in LookRow row) => (row.Detected, row.LostTo) switch

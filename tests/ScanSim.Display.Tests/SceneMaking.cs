@@ -52,19 +52,24 @@ internal static class SceneMaking
 
     public static SceneBuilder Gather(Scenario scenario, LooksKept looks = LooksKept.Best)
     {
-        var draws = new Random(20260512);
         var builder = new SceneBuilder(scenario);
+        Feed(builder, scenario, looks);
+        return builder;
+    }
+
+    /// <summary>The rows of a run, scan by scan.</summary>
+    public static void Feed(IRecordingSink sink, Scenario scenario, LooksKept looks = LooksKept.Best)
+    {
+        var draws = new Random(20260512);
         var beam = new BeamMotion(scenario.Radar.Scan);
         var scans = (int)Math.Ceiling(scenario.Run.DurationS / beam.PeriodS);
         for (var scan = 0; scan < scans; scan++)
         {
-            Turn(builder, scenario, beam, scan, looks, draws);
+            Turn(sink, scenario, beam, scan, looks, draws);
         }
-
-        return builder;
     }
 
-    private static void Turn(SceneBuilder builder, Scenario scenario, BeamMotion beam, int scan, LooksKept looks, Random draws)
+    private static void Turn(IRecordingSink sink, Scenario scenario, BeamMotion beam, int scan, LooksKept looks, Random draws)
     {
         var startS = scan * beam.PeriodS;
         var rows = new List<LookRow>();
@@ -96,10 +101,10 @@ internal static class SceneMaking
         }
 
         rows.Sort((a, b) => a.TimeS.CompareTo(b.TimeS));
-        builder.AddScan(new ScanRow { Scan = scan, StartS = startS, EndS = startS + beam.PeriodS, Looks = rows.Count, Hits = plots.Count, FalseHits = plots.Count(p => p.Kind == EchoKind.Noise), Plots = plots.Count, FalsePlots = plots.Count(p => p.Kind == EchoKind.Noise) });
-        builder.AddLooks(looks == LooksKept.None ? [] : rows.ToArray());
-        builder.AddPlots(plots.OrderBy(p => p.TimeS).ToArray());
-        builder.AddTruth(truth.OrderBy(t => t.TimeS).ToArray());
+        sink.AddScan(new ScanRow { Scan = scan, StartS = startS, EndS = startS + beam.PeriodS, Looks = rows.Count, Hits = plots.Count, FalseHits = plots.Count(p => p.Kind == EchoKind.Noise), Plots = plots.Count, FalsePlots = plots.Count(p => p.Kind == EchoKind.Noise) });
+        sink.AddLooks(looks == LooksKept.None ? [] : rows.ToArray());
+        sink.AddPlots(plots.OrderBy(p => p.TimeS).ToArray());
+        sink.AddTruth(truth.OrderBy(t => t.TimeS).ToArray());
     }
 
     public static TruthRow TruthRow(string target, int scan, double timeS, double eastM, double northM, double eastMps = 0, double northMps = 0, TargetView view = TargetView.InView) => new()

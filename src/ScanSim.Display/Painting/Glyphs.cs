@@ -45,25 +45,41 @@ internal static class Glyphs
     }
 
     /// <summary>The mark of one scan's outcome, within <paramref name="r"/> of its centre.</summary>
-    public static void Outcome(Sheet sheet, LookOutcome outcome, SKPoint centre, float r)
+    public static void Outcome(Sheet sheet, LookOutcome outcome, SKPoint centre, float r) => Outcomes(sheet, outcome, [centre], r);
+
+    /// <summary>The same mark at many places, drawn in one go.</summary>
+    public static void Outcomes(Sheet sheet, LookOutcome outcome, SKPoint[] centres, float r)
     {
         var colour = sheet.Colours.Outcomes[(int)outcome];
         if (outcome == LookOutcome.Detected)
         {
-            sheet.Disc(centre, r, colour);
+            sheet.Discs(centres, r, colour);
             return;
         }
 
         using var path = new SKPath();
-        if (outcome == LookOutcome.MissedMasked)
+        foreach (var centre in centres)
         {
-            Triangle(path, centre, r, -1);
-            sheet.Fill(path, colour);
-            return;
+            Add(path, outcome, centre, r);
         }
 
+        if (outcome == LookOutcome.MissedMasked)
+        {
+            sheet.Fill(path, colour);
+        }
+        else
+        {
+            sheet.Outline(path, r < 3.5f ? 1.2f : 1.5f, colour);
+        }
+    }
+
+    private static void Add(SKPath path, LookOutcome outcome, SKPoint centre, float r)
+    {
         switch (outcome)
         {
+            case LookOutcome.MissedMasked:
+                Triangle(path, centre, r, -1);
+                break;
             case LookOutcome.MissedRange:
                 Triangle(path, centre, r, 1);
                 break;
@@ -81,8 +97,6 @@ internal static class Glyphs
                 path.LineTo(centre.X + r, centre.Y);
                 break;
         }
-
-        sheet.Outline(path, r < 3.5f ? 1.2f : 1.5f, colour);
     }
 
     private static void Triangle(SKPath path, SKPoint centre, float r, int down)

@@ -16,7 +16,7 @@ internal sealed class LabelPlacer
     private static readonly float[] DistancesPx = [9, 20, 34, 50, 68, 90, 120];
 
     private readonly SKRect frame;
-    private readonly IReadOnlyList<SKRect> obstacles;
+    private readonly SKRect[] obstacles;
     private readonly MarkCounts marks;
     private readonly MarkCounts symbols;
     private readonly List<PlacedLabel> placed = [];
@@ -26,7 +26,7 @@ internal sealed class LabelPlacer
     {
         this.requests = requests;
         this.frame = frame;
-        this.obstacles = obstacles;
+        this.obstacles = [.. obstacles];
         this.marks = new MarkCounts(frame, marks);
         symbols = new MarkCounts(frame, requests.Select(r => r.Anchor));
     }
@@ -97,17 +97,15 @@ internal sealed class LabelPlacer
     private bool IsFree(in PlacedLabel candidate, int index)
     {
         var box = candidate.Box;
-        if (!frame.Contains(box) || obstacles.Any(o => Overlap(o, box)))
+        if (!frame.Contains(box) || CoversObstacle(box))
         {
             return false;
         }
 
-        for (var i = 0; i < requests.Count; i++)
+        // The counts are by cells: where they find nothing but the label's own point, nothing is near.
+        if (symbols.In(SKRect.Inflate(box, SymbolPx, SymbolPx)) > 0 && CoversSymbol(box, index))
         {
-            if (i != index && Overlap(Around(requests[i].Anchor, SymbolPx), box))
-            {
-                return false;
-            }
+            return false;
         }
 
         foreach (var other in placed)
@@ -120,13 +118,40 @@ internal sealed class LabelPlacer
 
         foreach (var obstacle in obstacles)
         {
-            if (Crosses(candidate, obstacle))
+            // From a point under an obstacle every leader starts across it.
+            if (!obstacle.Contains(candidate.Request.Anchor) && Crosses(candidate, obstacle))
             {
                 return false;
             }
         }
 
         return true;
+    }
+
+    private bool CoversObstacle(SKRect box)
+    {
+        foreach (var obstacle in obstacles)
+        {
+            if (Overlap(obstacle, box))
+            {
+                return true;
+            }
+        }
+
+        return false;
+    }
+
+    private bool CoversSymbol(SKRect box, int index)
+    {
+        for (var i = 0; i < requests.Count; i++)
+        {
+            if (i != index && Overlap(Around(requests[i].Anchor, SymbolPx), box))
+            {
+                return true;
+            }
+        }
+
+        return false;
     }
 
     private static SKRect Around(SKPoint point, float half) => new(point.X - half, point.Y - half, point.X + half, point.Y + half);

@@ -11,7 +11,7 @@ internal sealed record PictureLayout
     /// <summary>Of the picture's height: the plan keeps the larger part.</summary>
     private const float TimelineShareMost = 0.42f;
 
-    /// <summary>Room for one row of the timeline when there is plenty.</summary>
+    /// <summary>Room for one row of the timeline when there is plenty, on a picture of 900 and more; less on lower ones.</summary>
     public const float RowHeightMost = 22;
 
     /// <summary>11-unit text still fits without touching its neighbours.</summary>
@@ -44,7 +44,8 @@ internal sealed record PictureLayout
         var room = TimelineShareMost * height - timelineRest;
         var fitting = (int)(room / RowHeightLeast);
         var rows = Math.Clamp(targets, 1, fitting);
-        var rowHeight = Math.Clamp(MathF.Floor(room / rows), RowHeightLeast, RowHeightMost);
+        var rowHeightMost = Math.Clamp(MathF.Floor(RowHeightMost * height / 900), RowHeightLeast, RowHeightMost);
+        var rowHeight = Math.Clamp(MathF.Floor(room / rows), RowHeightLeast, rowHeightMost);
         var bottom = height - FootHeight;
         var top = MathF.Round(bottom - timelineRest - rows * rowHeight);
         return new PictureLayout

@@ -14,7 +14,7 @@ internal sealed class PlanFurniture
     private readonly SKRect arrowBox;
     private readonly SKRect siteBox;
 
-    public PlanFurniture(Sheet sheet, PlanProjection plan, string siteName, RangeUnit unit)
+    public PlanFurniture(Sheet sheet, PlanProjection plan, string siteName, RangeUnit unit, IReadOnlyList<TargetNow> targets)
     {
         this.sheet = sheet;
         this.plan = plan;
@@ -25,7 +25,7 @@ internal sealed class PlanFurniture
         barText = RangeText.OfStep(barM, unit);
         barBox = SKRect.Create(plan.Area.Left + 16, plan.Area.Bottom - 38, Math.Max(barPx, sheet.Width(barText, TextStyle.Small)) + 4, 26);
         arrowBox = SKRect.Create(plan.Area.Left + 14, plan.Area.Top + 12, 20, 46);
-        siteBox = SKRect.Create(plan.Origin.X + 8, plan.Origin.Y + 6, sheet.Width(this.siteName, TextStyle.Strong) + 4, 15);
+        siteBox = SiteBox(new SKSize(sheet.Width(this.siteName, TextStyle.Strong) + 4, 15), targets);
     }
 
     /// <summary>What labels must not cover.</summary>
@@ -46,6 +46,16 @@ internal sealed class PlanFurniture
             sheet.Rect(siteBox, sheet.Colours.Ground.WithAlpha(0xB0));
             sheet.Text(siteName, siteBox.Left + 2, siteBox.Bottom - 3.5f, TextStyle.Strong, ink);
         }
+    }
+
+    /// <summary>Beside the mark, in the corner with the fewest targets; below to the right if there is nothing to choose.</summary>
+    private SKRect SiteBox(SKSize size, IReadOnlyList<TargetNow> targets)
+    {
+        var origin = plan.Origin;
+        var (right, left) = (origin.X + 8, origin.X - 8 - size.Width);
+        var (below, above) = (origin.Y + 6, origin.Y - 6 - size.Height);
+        SKPoint[] corners = [new(right, below), new(left, below), new(right, above), new(left, above)];
+        return corners.Select(corner => SKRect.Create(corner, size)).MinBy(box => targets.Count(t => SKRect.Inflate(box, 7, 7).Contains(t.Position)));
     }
 
     private void PaintScaleBar()

@@ -83,16 +83,20 @@ internal sealed class PlanGrid
             ringsM.Add(n * stepM);
         }
 
+        // The bearing on which most rings can be labelled comes first, so that the labels stand in a line if they can.
+        var bearingsRad = RingLabelBearingsDeg.Select(b => b * (Math.PI / 180)).OrderByDescending(LabelledRings).ToList();
         foreach (var rangeM in ringsM)
         {
-            foreach (var bearingDeg in RingLabelBearingsDeg)
+            foreach (var bearingRad in bearingsRad)
             {
-                if (TryAdd(RangeText.OfStep(rangeM, unit), plan.Polar(rangeM, bearingDeg * (Math.PI / 180))))
+                if (TryAdd(RangeText.OfStep(rangeM, unit), plan.Polar(rangeM, bearingRad)))
                 {
                     break;
                 }
             }
         }
+
+        int LabelledRings(double bearingRad) => ringsM.Count(r => IsClear(BoxAt(RangeText.OfStep(r, unit), plan.Polar(r, bearingRad))));
     }
 
     private void LayBearings()
@@ -131,9 +135,8 @@ internal sealed class PlanGrid
 
     private bool TryAdd(string text, SKPoint centre)
     {
-        var half = sheet.Width(text, TextStyle.Small) / 2 + 3;
-        var box = new SKRect(centre.X - half, centre.Y - 7, centre.X + half, centre.Y + 7);
-        if (!plan.Area.Contains(box) || taken.Any(t => t.IntersectsWith(box)) || labels.Exists(l => l.Box.IntersectsWith(SKRect.Inflate(box, 4, 2))))
+        var box = BoxAt(text, centre);
+        if (!IsClear(box))
         {
             return false;
         }
@@ -141,4 +144,13 @@ internal sealed class PlanGrid
         labels.Add(new GridLabel(text, centre, box));
         return true;
     }
+
+    private SKRect BoxAt(string text, SKPoint centre)
+    {
+        var half = sheet.Width(text, TextStyle.Small) / 2 + 3;
+        return new SKRect(centre.X - half, centre.Y - 7, centre.X + half, centre.Y + 7);
+    }
+
+    private bool IsClear(SKRect box) =>
+        plan.Area.Contains(box) && !taken.Any(t => t.IntersectsWith(box)) && !labels.Exists(l => l.Box.IntersectsWith(SKRect.Inflate(box, 4, 2)));
 }

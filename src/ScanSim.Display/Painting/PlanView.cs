@@ -15,7 +15,8 @@ internal static class PlanView
         sheet.Canvas.Save();
         sheet.Canvas.ClipRect(area);
         var marks = new PlanMarks(sheet, plan, scene, view, timeS);
-        var furniture = new PlanFurniture(sheet, plan, scene.SiteName, view.Unit);
+        var targets = view.ShowTruth ? marks.TargetsNow() : [];
+        var furniture = new PlanFurniture(sheet, plan, scene.SiteName, view.Unit, targets);
         var grid = new PlanGrid(sheet, plan, scene.InstrumentedRangeM, view.RangeM ?? scene.InstrumentedRangeM, view.Unit, [.. furniture.Boxes, CountBox(area)]);
         marks.PaintBlanked();
         grid.PaintLines();
@@ -26,7 +27,6 @@ internal static class PlanView
 
         grid.PaintLabels();
         marks.PaintBeam();
-        var targets = view.ShowTruth ? marks.TargetsNow() : [];
         marks.PaintTargets(targets);
         var plots = marks.PaintPlots();
         if (view.ShowLabels)

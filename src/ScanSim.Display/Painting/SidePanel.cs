@@ -86,6 +86,11 @@ internal sealed class SidePanel(Sheet sheet, Scene scene, ViewOptions view, doub
         }
 
         Entry("Beam, true width", c => Wedge(c, sheet.Colours.Ink.WithAlpha(0x38), sheet.Colours.Ink.WithAlpha(0x70), 3));
+        if (scene.Beam.Limits is not null)
+        {
+            Entry("Swept sector", c => Wedge(c, SKColors.Transparent, sheet.Colours.Trail, 6));
+        }
+
         if (!scene.Blanked.IsEmpty)
         {
             Entry("Transmitter off", c => Wedge(c, sheet.Colours.Trail.WithAlpha(0x30), sheet.Colours.Trail.WithAlpha(0x90), 6));

@@ -19,7 +19,7 @@ internal sealed class TimelineHead
         foreach (var outcome in Occurring(scene))
         {
             var needed = SwatchWidth + sheet.Width(OutcomeText.Of(outcome), TextStyle.Body) + 20;
-            if (x + needed > width && x > start)
+            if (x + needed > width - TimelineView.ShareWidth && x > start)
             {
                 (x, y) = (start, y + LineHeight);
             }

@@ -8,9 +8,11 @@ internal sealed class TimelineView
     /// <summary>What the timeline needs below its rows.</summary>
     public const float AxisHeight = 26;
 
+    /// <summary>Kept at the right for the blip-scan ratio.</summary>
+    public const float ShareWidth = 62;
+
     /// <summary>Narrower scans are gathered in columns.</summary>
     private const float LeastMarkPx = 7;
-    private const float ShareWidth = 62;
     private const float MostLabelWidth = 150;
 
     private readonly Sheet sheet;
@@ -78,9 +80,9 @@ internal sealed class TimelineView
         }
 
         var r = Math.Min(Math.Min(ScanPx - 1.5f, rowHeight - 5) / 2, 5.5f);
-        foreach (var look in target.Looks)
+        foreach (var marks in target.Looks.GroupBy(look => look.Outcome))
         {
-            Glyphs.Outcome(sheet, look.Outcome, new SKPoint(X(look.TimeS), row.MidY), r);
+            Glyphs.Outcomes(sheet, marks.Key, [.. marks.Select(look => new SKPoint(X(look.TimeS), row.MidY))], r);
         }
     }
 
