@@ -78,6 +78,7 @@ internal static class RunCommand
         var tally = new RunTally(scenario, writer);
         ProgressBar.Around("scans", report => Engine.Run.Execute(scenario, options, tally, report, interruption.Token));
         interruption.Token.ThrowIfCancellationRequested();
+        tally.Finish();
         writer.Complete();
         return tally;
     }

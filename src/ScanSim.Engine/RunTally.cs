@@ -12,14 +12,14 @@ public sealed class RunTally : IRecordingSink
     private readonly ImmutableArray<string> ids;
 
     /// <summary>Begins to count.</summary>
-    /// <param name="scenario">Gives the targets and the duration of a scan, which tells two plots of one pass from plots of two.</param>
+    /// <param name="scenario">Gives the targets, and how long the beam takes over the widest plot.</param>
     /// <param name="next">Where the rows go on to.</param>
     public RunTally(Scenario scenario, IRecordingSink next)
     {
         this.next = next;
-        var scanS = ScanTimeline.Of(scenario).ScanS;
+        var reachS = 0.5 * scenario.Radar.Plots.MaximumWidthRad / ScanTimeline.Of(scenario).BeamSpeedRadPerS;
         ids = [.. scenario.Targets.Select(t => t.Id)];
-        targets = ids.ToDictionary(id => id, id => new TargetTally(id, scanS), StringComparer.Ordinal);
+        targets = ids.ToDictionary(id => id, id => new TargetTally(id, reachS), StringComparer.Ordinal);
     }
 
     public int Scans { get; private set; }
@@ -36,6 +36,15 @@ public sealed class RunTally : IRecordingSink
 
     /// <summary>In the scenario's order.</summary>
     public IEnumerable<TargetTally> Targets => ids.Select(id => targets[id]);
+
+    /// <summary>Counts the passes that are still open; call it when the run is over.</summary>
+    public void Finish()
+    {
+        foreach (var target in targets.Values)
+        {
+            target.Finish();
+        }
+    }
 
     public void AddScan(in ScanRow row)
     {

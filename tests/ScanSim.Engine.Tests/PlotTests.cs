@@ -58,10 +58,30 @@ public class PlotTests
         var scenario = TestScenario.With(TestScenario.Still("north", 0, 6_000, 200, 0));
         var tally = new RunTally(scenario, new CollectingSink());
         Run.Execute(scenario, new RunOptions(), tally, null, CancellationToken.None);
+        tally.Finish();
         var target = tally.Targets.Single();
         Assert.Equal(1, target.BlipScanRatio);
         Assert.InRange(target.LongestGapS!.Value, 2.4, 2.6);
         Assert.InRange(target.FirstPlotRangeM!.Value, 5_900, 6_100);
+    }
+
+    [Fact]
+    public void Tally_counts_no_plot_through_the_side_lobes()
+    {
+        // The ship at 300 m gives plots all round, but only one a scan where it is; the far boat is never seen.
+        var scenario = TestScenario.With(TestScenario.Still("ship", 90, 300, 5_000, 0), TestScenario.Still("boat", 200, 15_000, 0.01, 1));
+        var sink = new CollectingSink();
+        var tally = new RunTally(scenario, sink);
+        Run.Execute(scenario, new RunOptions(), tally, null, CancellationToken.None);
+        tally.Finish();
+        Assert.True(sink.Plots.Count(p => p.Target == "ship") > 1000);
+        var (ship, boat) = (tally.Targets.First(), tally.Targets.Last());
+        Assert.Equal((24, 24, 24), (ship.ScansAlive, ship.ScansInView, ship.ScansWithPlot));
+        Assert.Equal((24, 24, 0), (boat.ScansAlive, boat.ScansInView, boat.ScansWithPlot));
+        Assert.Null(boat.FirstPlotS);
+        Assert.Null(boat.LongestGapS);
+        Assert.Equal(sink.Scans.Sum(s => (long)s.Looks), tally.Looks);
+        Assert.Equal(sink.Plots.Count(p => p.Kind == EchoKind.Noise), tally.FalsePlots);
     }
 
     [Fact]
