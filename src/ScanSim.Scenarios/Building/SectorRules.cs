@@ -5,6 +5,9 @@ namespace ScanSim.Scenarios.Building;
 /// <summary>Rules of the scanned sector and of the blanked ones.</summary>
 internal static class SectorRules
 {
+    /// <summary>Smaller than this a gap is the rounding of azimuths given in degrees.</summary>
+    private const double RoundingRad = 1e-9;
+
     public static void Check(CheckedBlock radar, FaultList faults)
     {
         var scanned = radar.BlockOrNull("sector") is { Sound: true } sector ? sector : null;
@@ -49,7 +52,7 @@ internal static class SectorRules
         var reachedRad = 0.0;
         foreach (var (fromRad, toRad) in spans)
         {
-            if (fromRad > reachedRad)
+            if (fromRad > reachedRad + RoundingRad)
             {
                 break;
             }
@@ -57,7 +60,6 @@ internal static class SectorRules
             reachedRad = Math.Max(reachedRad, toRad);
         }
 
-        // A billionth of a radian is the rounding of azimuths given in degrees, not a gap.
-        return reachedRad >= widthRad - 1e-9;
+        return reachedRad >= widthRad - RoundingRad;
     }
 }
