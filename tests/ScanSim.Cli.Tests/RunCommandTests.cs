@@ -180,7 +180,7 @@ public sealed class RunCommandTests : IDisposable
     {
         try
         {
-            using var process = System.Diagnostics.Process.Start(new System.Diagnostics.ProcessStartInfo(program, arguments) { RedirectStandardError = true })!;
+            using var process = System.Diagnostics.Process.Start(new System.Diagnostics.ProcessStartInfo(program, arguments) { UseShellExecute = false, RedirectStandardError = true })!;
             process.WaitForExit();
             return process.ExitCode;
         }

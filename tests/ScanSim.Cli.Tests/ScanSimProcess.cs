@@ -22,7 +22,7 @@ internal static class ScanSimProcess
 
     public static Process Start(params string[] arguments)
     {
-        var start = new ProcessStartInfo("dotnet") { RedirectStandardOutput = true, RedirectStandardError = true, WorkingDirectory = Path.GetTempPath() };
+        var start = new ProcessStartInfo("dotnet") { UseShellExecute = false, RedirectStandardOutput = true, RedirectStandardError = true, WorkingDirectory = Path.GetTempPath() };
         start.ArgumentList.Add(Program);
         foreach (var argument in arguments)
         {
