@@ -6,13 +6,17 @@ namespace ScanSim.Display;
 /// <summary>Makes a scene of a finished recording.</summary>
 public static class SceneReader
 {
-    /// <summary>Everything for the timeline, and the plots from <paramref name="plotsFromS"/> to <paramref name="plotsToS"/> for the plan.</summary>
-    /// <param name="recording">Read from disk while this runs; its faults come out as <see cref="RecordingException"/>.</param>
-    /// <param name="scenario">Of the recording's own scenario text.</param>
-    /// <param name="plotsFromS">For one picture: its time less the afterglow.</param>
-    /// <param name="plotsToS">For one picture: its time.</param>
-    public static Scene Load(
-        Recording recording, Scenario scenario, double plotsFromS = double.NegativeInfinity, double plotsToS = double.PositiveInfinity)
+    /// <summary>
+    /// The whole of a recording's timeline, and for the plan the plots from <paramref name="plotsFromS"/> to <paramref name="plotsToS"/>
+    /// (for one picture: from its time less the afterglow to its time).
+    /// </summary>
+    /// <exception cref="RecordingException">A table is damaged.</exception>
+    /// <exception cref="ScenarioException">The recording's scenario.json is not valid for this version.</exception>
+    public static Scene Load(Recording recording, double plotsFromS = double.NegativeInfinity, double plotsToS = double.PositiveInfinity) =>
+        Load(recording, ScenarioFile.Parse(recording.ScenarioText, "scenario.json of the recording"), plotsFromS, plotsToS);
+
+    /// <summary>The same with a scenario that was read before.</summary>
+    public static Scene Load(Recording recording, Scenario scenario, double plotsFromS, double plotsToS)
     {
         var builder = new SceneBuilder(scenario) { PlotsFromS = plotsFromS, PlotsToS = plotsToS };
         foreach (var row in recording.Scans())

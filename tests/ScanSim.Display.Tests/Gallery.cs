@@ -1,3 +1,6 @@
+using ScanSim.Scenarios;
+using ScanSim.Testing;
+
 namespace ScanSim.Display.Tests;
 
 /// <summary>Pictures to look at: written to the folder that SCANSIM_GALLERY names.</summary>
@@ -31,6 +34,12 @@ public sealed class Gallery
         Save(hours, new ViewOptions { Theme = Theme.Paper }, 5000, PictureSize.Default, "hours.svg");
         Save(SceneMaking.Scene(200), new ViewOptions(), 203, new(3840, 2160), "200-4k.png");
         Save(SceneMaking.Scene(50), new ViewOptions { Theme = Theme.Paper }, 203, new(3840, 2160, 2), "50-4k-scale2.png");
+
+        foreach (var path in Directory.GetFiles(Path.Combine(RepositoryRoot.Find(), "scenarios"), "*.json"))
+        {
+            var scene = SceneMaking.Gather(ScenarioFile.Load(path)).Build();
+            Save(scene, new ViewOptions { Unit = RangeUnit.NauticalMile }, 0.4 * scene.DurationS, PictureSize.Default, Path.GetFileNameWithoutExtension(path) + ".png");
+        }
 
         void Save(Scene scene, ViewOptions view, double timeS, PictureSize size, string name) =>
             Picture.Save(scene, view, timeS, size, Path.Combine(folder, name));

@@ -77,6 +77,11 @@ internal static class SceneMaking
         var truth = new List<TruthRow>();
         foreach (var target in scenario.Targets)
         {
+            if (startS < target.Track.StartS || startS + beam.PeriodS > target.Track.EndS)
+            {
+                continue;
+            }
+
             var row = Truth(target, scan, startS, beam.PeriodS, scenario);
             if (row.TimeS > scenario.Run.DurationS)
             {

@@ -44,7 +44,7 @@ internal sealed record PictureLayout
         var room = TimelineShareMost * height - timelineRest;
         var fitting = (int)(room / RowHeightLeast);
         var rows = Math.Clamp(targets, 1, fitting);
-        var rowHeightMost = Math.Clamp(MathF.Floor(RowHeightMost * height / 900), RowHeightLeast, RowHeightMost);
+        var rowHeightMost = Math.Clamp(MathF.Floor(RowHeightMost * height / 900), RowHeightLeast + 2, RowHeightMost);
         var rowHeight = Math.Clamp(MathF.Floor(room / rows), RowHeightLeast, rowHeightMost);
         var bottom = height - FootHeight;
         var top = MathF.Round(bottom - timelineRest - rows * rowHeight);

@@ -12,7 +12,7 @@ internal sealed class PlanGrid
     private const float DenseRadiusPx = 420;
 
     /// <summary>Where ring labels stand, in degrees, in order of preference: between the 30 degree lines.</summary>
-    private static readonly int[] RingLabelBearingsDeg = [75, 105, 255, 285, 45, 135, 225, 315, 15, 165, 195, 345];
+    private static readonly int[] RingLabelBearingsDeg = [45, 135, 225, 315, 75, 105, 255, 285, 15, 165, 195, 345];
 
     private readonly Sheet sheet;
     private readonly PlanProjection plan;

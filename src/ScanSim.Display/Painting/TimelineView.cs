@@ -13,6 +13,7 @@ internal sealed class TimelineView
 
     /// <summary>Narrower scans are gathered in columns.</summary>
     private const float LeastMarkPx = 7;
+    private const float ColumnHeightMost = 14;
     private const float MostLabelWidth = 150;
 
     private readonly Sheet sheet;
@@ -75,7 +76,7 @@ internal sealed class TimelineView
         sheet.Text(share, area.Right - 16, baseline, TextStyle.Small, sheet.Colours.Ink, SKTextAlign.Right);
         if (columns)
         {
-            new TimelineColumns(sheet, ScanPx, SKRect.Inflate(row, 0, -2)).Paint(target.Looks, firstScan);
+            new TimelineColumns(sheet, ScanPx, SKRect.Inflate(row, 0, -Math.Max(2, MathF.Floor((rowHeight - ColumnHeightMost) / 2)))).Paint(target.Looks, firstScan);
             return;
         }
 
