@@ -88,7 +88,7 @@ public sealed class WriterTests
         Assert.InRange(late - early, long.MinValue, 4_000_000);
     }
 
-    [Fact]
+    [Fact(Explicit = true)]
     [Trait("Category", "Long")]
     public void Three_million_looks_leave_the_heap_bounded()
     {

@@ -88,7 +88,7 @@ public sealed class DrawStreamTests
         Assert.Throws<ArgumentOutOfRangeException>(() => stream.NextPoisson(2e9));
     }
 
-    [Fact]
+    [Fact(Explicit = true)]
     [Trait("Category", "Long")]
     public void A_used_up_address_says_so_instead_of_running_into_another_purpose()
     {
