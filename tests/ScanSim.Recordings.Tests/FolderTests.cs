@@ -107,6 +107,17 @@ public sealed class FolderTests
     }
 
     [Fact]
+    public void A_path_may_end_in_a_separator_and_must_be_one()
+    {
+        using var folder = new TemporaryFolder();
+        Samples.Write(folder.Recording + "/", Samples.Rows, TableFormat.Csv).Verify();
+        Assert.Throws<RecordingException>(() => RecordingWriter.Create("", Samples.Head, force: false));
+        Assert.Throws<RecordingException>(() => RecordingWriter.Create("a\0b", Samples.Head, force: true));
+        Assert.Throws<RecordingException>(() => Recording.Open("a\0b"));
+        Assert.Throws<RecordingException>(() => Recording.Open(""));
+    }
+
+    [Fact]
     public void A_folder_that_cannot_be_written_is_said_so()
     {
         Assert.SkipUnless(Directory.Exists("/proc/self"), "needs a place that even root cannot write to");

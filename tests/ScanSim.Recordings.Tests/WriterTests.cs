@@ -84,7 +84,7 @@ public sealed class WriterTests
         var early = HeapAfter(writer, looks: 40_000);
         var late = HeapAfter(writer, looks: 400_000);
 
-        // A row takes 184 bytes of columns: kept rows would be 74 MB. The list of row groups grows by about 10 KB for each group of 4096.
+        // A row takes 184 bytes of columns: kept rows would be 74 MB. The list of row groups grows by 12 KB for each of them.
         Assert.InRange(late - early, long.MinValue, 4_000_000);
     }
 

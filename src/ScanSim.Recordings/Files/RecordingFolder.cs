@@ -69,7 +69,7 @@ internal sealed class RecordingFolder(string path)
 
     private void Make()
     {
-        var parent = System.IO.Path.GetDirectoryName(System.IO.Path.GetFullPath(Path));
+        var parent = Parent();
         if (!Directory.Exists(parent))
         {
             throw new RecordingException($"{Path} cannot be made: there is no folder {parent}");
@@ -77,6 +77,19 @@ internal sealed class RecordingFolder(string path)
 
         FileFault.Writing(Path, () => Directory.CreateDirectory(Path));
         Mark();
+    }
+
+    /// <summary>The folder above, also where the path ends in a separator.</summary>
+    private string? Parent()
+    {
+        try
+        {
+            return System.IO.Path.GetDirectoryName(System.IO.Path.TrimEndingDirectorySeparator(System.IO.Path.GetFullPath(Path)));
+        }
+        catch (ArgumentException fault)
+        {
+            throw new RecordingException($"\"{Path}\" is no path of a folder: {fault.Message}", fault);
+        }
     }
 
     private void Clear()
