@@ -47,8 +47,7 @@ internal static class PictureCommand
                 AfterglowScans = parsed.GetValue(afterglow),
                 ShowTruth = !parsed.GetValue(noTruth),
             };
-            var scenario = ScenarioFile.Parse(recording.ScenarioText, Path.Combine(parsed.GetValue(folder)!, "scenario.json"));
-            Picture.Save(SceneReader.Load(recording, scenario), view, timeS, parsed.GetValue(size) with { Scale = parsed.GetValue(scale) }, parsed.GetValue(output)!);
+            Picture.Save(SceneReader.Load(recording), view, timeS, parsed.GetValue(size) with { Scale = parsed.GetValue(scale) }, parsed.GetValue(output)!);
             return ExitCode.Done;
         });
         return (command, "scansim picture out --at \"125 s\" -o harbour.png\nscansim picture out --at \"5 min\" -o harbour.pdf --paper --unit nmi");

@@ -17,9 +17,15 @@ public sealed class SceneBuilder : IRecordingSink
     public SceneBuilder(Scenario scenario)
     {
         this.scenario = scenario;
+        var beamRadPerS = scenario.Radar.Scan switch
+        {
+            Scan.Rotation rotation => 2 * Math.PI / rotation.PeriodS,
+            Scan.Sector sector => sector.RateRadPerS,
+            _ => throw new InvalidOperationException("unknown kind of scan"),
+        };
         foreach (var target in scenario.Targets)
         {
-            gatherings.Add(target.Id, new TargetGathering(target));
+            gatherings.Add(target.Id, new TargetGathering(target, 0.5 * scenario.Radar.Plots.MaximumWidthRad / beamRadPerS));
         }
     }
 
@@ -59,7 +65,7 @@ public sealed class SceneBuilder : IRecordingSink
             {
                 foreach (var id in row.Target.Split('+'))
                 {
-                    Of(id, "plots").AddPlot(row.Scan);
+                    Of(id, "plots").AddPlot(row.TimeS);
                 }
             }
         }

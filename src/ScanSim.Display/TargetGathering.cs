@@ -5,11 +5,13 @@ using ScanSim.Scenarios;
 namespace ScanSim.Display;
 
 /// <summary>The rows of one target while a scene is gathered.</summary>
-internal sealed class TargetGathering(Target target)
+/// <param name="target">The target.</param>
+/// <param name="reachS">A plot belongs to the pass that is no further away in time; echoes through side lobes belong to none.</param>
+internal sealed class TargetGathering(Target target, double reachS)
 {
     private readonly List<TruthMark> truth = [];
     private readonly Dictionary<int, LookMark> looks = [];
-    private readonly HashSet<int> scansWithPlot = [];
+    private readonly List<double> plotTimesS = [];
 
     public void Add(in TruthRow row)
     {
@@ -28,10 +30,11 @@ internal sealed class TargetGathering(Target target)
         }
     }
 
-    public void AddPlot(int scan) => scansWithPlot.Add(scan);
+    public void AddPlot(double timeS) => plotTimesS.Add(timeS);
 
     public SceneTarget Build(bool recordingHasLooks)
     {
+        plotTimesS.Sort();
         var looksWithoutTruth = new HashSet<int>(looks.Keys);
         var marks = ImmutableArray.CreateBuilder<LookMark>(truth.Count);
         var inView = 0;
@@ -44,7 +47,7 @@ internal sealed class TargetGathering(Target target)
             if (t.View == TargetView.InView || looked)
             {
                 inView++;
-                withPlot += scansWithPlot.Contains(t.Scan) ? 1 : 0;
+                withPlot += HasPlot(t.TimeS) ? 1 : 0;
             }
         }
 
@@ -62,6 +65,13 @@ internal sealed class TargetGathering(Target target)
         };
     }
 
+    private bool HasPlot(double passS)
+    {
+        var index = plotTimesS.BinarySearch(passS - reachS);
+        index = index < 0 ? ~index : index;
+        return index < plotTimesS.Count && plotTimesS[index] <= passS + reachS;
+    }
+
     private LookOutcome WithoutLook(in TruthMark mark, bool recordingHasLooks)
     {
         if (recordingHasLooks || mark.View != TargetView.InView)
@@ -69,7 +79,7 @@ internal sealed class TargetGathering(Target target)
             return LookOutcome.NoLook;
         }
 
-        return scansWithPlot.Contains(mark.Scan) ? LookOutcome.Detected : LookOutcome.MissedUnrecorded;
+        return HasPlot(mark.TimeS) ? LookOutcome.Detected : LookOutcome.MissedUnrecorded;
     }
 
     private static bool IsBetter(in LookMark mark, in LookMark known)

@@ -67,6 +67,15 @@ public sealed class SceneBuilderTests
     }
 
     [Fact]
+    public void An_echo_through_a_side_lobe_is_no_plot_of_the_targets_pass()
+    {
+        builder.AddTruth([.. Enumerable.Range(0, 4).Select(s => SceneMaking.TruthRow(first, s, 2.5 * s + 1, 1000, 0))]);
+        // In its pass in scan 0, half a turn later in scan 1, just over the north mark of its pass in scan 3.
+        builder.AddPlots([SceneMaking.PlotRow(first, 0, 1, 1000, 90), SceneMaking.PlotRow(first, 1, 4.75, 1000, 270), SceneMaking.PlotRow(first, 2, 8.49, 1000, 90)]);
+        Assert.Equal(0.5, builder.Build().Targets[0].BlipScanRatio);
+    }
+
+    [Fact]
     public void Without_looks_the_plots_tell_what_was_detected_and_reasons_are_left_open()
     {
         builder.AddTruth([.. Enumerable.Range(0, 3).Select(s => SceneMaking.TruthRow(first, s, 2.5 * s + 1, 1000, 0, view: s == 2 ? TargetView.Blanked : TargetView.InView))]);
