@@ -36,7 +36,7 @@ public static class ScenarioFile
         try
         {
             var tree = JsonTree.Read(Strict.GetBytes(text));
-            if (new Checker(faults).Check(FileFormat.Root, tree, "$", ShapeWords.Of(FileFormat.Root)) is CheckedBlock root)
+            if (new Checker(faults).Check(FileFormat.Root, tree, "$") is CheckedBlock root)
             {
                 scenario = new ScenarioBuilder(root, faults).Build(text, faults.Count == 0 ? ScenarioDigest.Of(tree) : "");
             }

@@ -21,7 +21,7 @@ internal static class FormatWalk
     public static ImmutableArray<ScenarioFault> Faults(Property property, string json)
     {
         var faults = new FaultList(property.Name);
-        new Checker(faults).Check(property.Shape, JsonTree.Read(Encoding.UTF8.GetBytes(json)), "$", "");
+        new Checker(faults).Check(property.Shape, JsonTree.Read(Encoding.UTF8.GetBytes(json)), "$");
         return faults.InOrder();
     }
 

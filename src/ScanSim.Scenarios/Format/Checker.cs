@@ -7,27 +7,27 @@ namespace ScanSim.Scenarios.Format;
 internal sealed class Checker(FaultList faults)
 {
     /// <summary>The value as its shape reads it; null when it has a fault (blocks and lists come with what is sound in them).</summary>
-    public CheckedValue? Check(Shape shape, JsonValue json, string path, string expected) => shape switch
+    public CheckedValue? Check(Shape shape, JsonValue json, string path, Property? property = null) => shape switch
     {
-        Shape.OfBlock block => Block(block, json, path, expected),
-        Shape.OfList list => List(list, json, path, expected),
-        Shape.OfEither either => Either(either, json, path, expected),
-        _ => Plain(shape, json, path, expected),
+        Shape.OfBlock block => Block(block, json, path),
+        Shape.OfList list => List(list, json, path),
+        Shape.OfEither either => Either(either, json, path, property),
+        _ => Plain(shape, json, path, property),
     };
 
-    private CheckedValue? Plain(Shape shape, JsonValue json, string path, string expected)
+    private CheckedValue? Plain(Shape shape, JsonValue json, string path, Property? property)
     {
         var value = PlainValue.Read(shape, json, path, out var reason);
         if (value is null)
         {
-            faults.Add(json, path, reason.Length == 0 ? json.Shown() : $"{json.Shown()} ({reason})", expected);
+            faults.Add(json, path, reason.Length == 0 ? json.Shown() : $"{json.Shown()} ({reason})", Expected(shape, property));
         }
 
         return value;
     }
 
     /// <summary>The first shape that fits; lists are checked item by item once the kind says that one is meant.</summary>
-    private CheckedValue? Either(Shape.OfEither either, JsonValue json, string path, string expected)
+    private CheckedValue? Either(Shape.OfEither either, JsonValue json, string path, Property? property)
     {
         var reasons = new List<string>();
         foreach (var shape in either.Shapes)
@@ -36,7 +36,7 @@ internal sealed class Checker(FaultList faults)
             {
                 if (json.Kind == JsonKind.List)
                 {
-                    return List(list, json, path, expected);
+                    return List(list, json, path);
                 }
 
                 continue;
@@ -51,28 +51,27 @@ internal sealed class Checker(FaultList faults)
         }
 
         var told = reasons.Where(reason => reason.Length > 0).Distinct(StringComparer.Ordinal).ToList();
-        faults.Add(json, path, told.Count == 1 ? $"{json.Shown()} ({told[0]})" : json.Shown(), expected);
+        faults.Add(json, path, told.Count == 1 ? $"{json.Shown()} ({told[0]})" : json.Shown(), Expected(either, property));
         return null;
     }
 
-    private CheckedValue.OfList? List(Shape.OfList list, JsonValue json, string path, string expected)
+    private CheckedValue.OfList? List(Shape.OfList list, JsonValue json, string path)
     {
         if (json.Kind != JsonKind.List)
         {
-            faults.Add(json, path, json.Shown(), expected);
+            faults.Add(json, path, json.Shown(), ShapeWords.Of(list));
             return null;
         }
 
         if (json.Items.Length < list.Fewest || json.Items.Length > list.Most)
         {
-            faults.Add(json, path, json.Items.Length == 0 ? "an empty list" : $"a list of {json.Items.Length}", expected);
+            faults.Add(json, path, json.Items.Length == 0 ? "an empty list" : $"a list of {json.Items.Length}", ShapeWords.Of(list));
         }
 
         var items = ImmutableArray.CreateBuilder<CheckedValue>();
-        var itemExpected = ShapeWords.Of(list.Item);
         for (var i = 0; i < json.Items.Length; i++)
         {
-            if (Check(list.Item, json.Items[i], PathText.Item(path, i), itemExpected) is { } item)
+            if (Check(list.Item, json.Items[i], PathText.Item(path, i)) is { } item)
             {
                 items.Add(item);
             }
@@ -81,11 +80,11 @@ internal sealed class Checker(FaultList faults)
         return new CheckedValue.OfList(json, path, items.ToImmutable());
     }
 
-    private CheckedBlock? Block(Shape.OfBlock block, JsonValue json, string path, string expected)
+    private CheckedBlock? Block(Shape.OfBlock block, JsonValue json, string path)
     {
         if (json.Kind != JsonKind.Block)
         {
-            faults.Add(json, path, json.Shown(), expected);
+            faults.Add(json, path, json.Shown(), ShapeWords.Of(block));
             return null;
         }
 
@@ -102,7 +101,7 @@ internal sealed class Checker(FaultList faults)
             }
 
             var value = member ?? (open.Contains(property.Name) ? Default(property, json) : null);
-            if (value is not null && Check(property.Shape, value, PathText.Member(path, property.Name), ShapeWords.Of(property)) is { } sound)
+            if (value is not null && Check(property.Shape, value, PathText.Member(path, property.Name), property) is { } sound)
             {
                 values[property.Name] = sound;
             }
@@ -135,6 +134,8 @@ internal sealed class Checker(FaultList faults)
 
         return given;
     }
+
+    private static string Expected(Shape shape, Property? property) => property is null ? ShapeWords.Of(shape) : ShapeWords.Of(property);
 
     private static string Allowed(Shape.OfBlock block, string written)
     {

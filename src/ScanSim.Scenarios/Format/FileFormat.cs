@@ -9,7 +9,7 @@ internal static class FileFormat
         "site",
         "Where the antenna stands (WGS-84). Heights are above mean sea level and are used as heights above the ellipsoid: the geoid's separation is left out.",
         [
-            Property.Needed("name", Shapes.Line, "Name of the site, shown on pictures.", "\"Cape Tarn\""),
+            Property.Needed("name", Shapes.Line, "Name of the site, shown on pictures.", "\"Quillhaven lookout\""),
             Property.Needed(
                 "latitude",
                 new Shape.OfQuantity(Dimension.Angle) { AtLeast = "-89.9 deg", AtMost = "89.9 deg" },

@@ -17,8 +17,8 @@ internal sealed class ReferencePage
         Times are seconds (or another unit of time) from `run.start`. Azimuths, bearings and headings are clockwise from true north.
         Heights are above mean sea level.
 
-        This page is made from the same description that checks the files; do not edit it by hand
-        (DEVELOPERS.md says how it is rewritten).
+        This page is made from the same description that checks the files; do not edit it by hand. After a change of the format,
+        the tests of ScanSim.Scenarios rewrite it when the environment variable SCANSIM_REWRITE_REFERENCE is 1.
 
         """;
 
@@ -41,6 +41,21 @@ internal sealed class ReferencePage
 
         """;
 
+    private const string Rules = """
+
+        ## Rules between properties
+
+        * `pulseWidth` is shorter than the time between two pulses of every PRF; `compressedWidth` is not above `pulseWidth`.
+        * `instrumentedRange` is not beyond the unambiguous range c / (2 PRF) of any PRF.
+        * A sector has two different azimuths and is at least one azimuth beamwidth wide; blanked sectors leave something to see.
+        * `pulsesPerDwell` fits into one scan; `"beamwidth"` gives 1 to 10000 pulses: azimuth beamwidth * PRF / scan rate.
+        * `duration` has less than 2^32 dwells.
+        * The cosecant-squared part begins (tilt + beamwidth / 2) above the horizontal and below `upTo`.
+        * Target ids differ, and so do their 32-bit FNV-1a hashes, under which the targets draw their random numbers.
+        * Tracks stay within 2000 km east, west, north and south of the site and within 720 h of time 0.
+
+        """;
+
     private readonly StringBuilder text = new();
     private readonly HashSet<string> written = new(StringComparer.Ordinal);
 
@@ -49,7 +64,7 @@ internal sealed class ReferencePage
         var page = new ReferencePage();
         page.text.Append(Head);
         page.Block(root);
-        page.text.Append(Motion);
+        page.text.Append(Motion).Append(Rules);
         page.UnitTable();
         return page.text.ToString();
     }
