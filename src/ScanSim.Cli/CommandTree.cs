@@ -20,7 +20,7 @@ internal static class CommandTree
         Add(root, examples, PictureCommand.Create());
         root.Options.OfType<HelpOption>().Single().Action = new HelpWithExample(examples);
         var parsed = root.Parse(args);
-        if (parsed.Errors.Count > 0)
+        if (parsed.Errors.Count > 0 && parsed.Action is not HelpWithExample)
         {
             foreach (var error in parsed.Errors)
             {
