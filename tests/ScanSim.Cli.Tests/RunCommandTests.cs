@@ -75,7 +75,7 @@ public sealed class RunCommandTests : IDisposable
         Directory.CreateDirectory(folder.Of("out"));
         File.WriteAllText(folder.Of("out/mine.txt"), "precious");
         ScanSimProcess.Run("run", ScanSimProcess.Harbour, "-o", folder.Of("out")).AssertRefused("out");
-        ScanSimProcess.Run("run", ScanSimProcess.Harbour, "-o", folder.Of("out"), "--force").AssertRefused("mine.txt");
+        ScanSimProcess.Run("run", ScanSimProcess.Harbour, "-o", folder.Of("out"), "--force").AssertRefused("out", "neither");
         Assert.Equal("precious", File.ReadAllText(folder.Of("out/mine.txt")));
         Assert.Single(Directory.GetFiles(folder.Of("out")));
     }

@@ -1,0 +1,9 @@
+namespace ScanSim.Display.Windowing;
+
+public enum PointerButton
+{
+    None = 0,
+    Left = 1,
+    Middle = 2,
+    Right = 3,
+}
