@@ -63,11 +63,11 @@ public sealed record Budget
         var dwell = DwellOn(timeline, sight.AzimuthRad);
         var pulseSnr = new double[dwell.Pulses];
         var look = model.LookAt(target.RcsM2, state, dwell, pulseSnr);
-        return Of(scenario, target, timeS, state, model.ViewOf(sight, dwell.PriS), look, dwell, pulseSnr);
+        return Of(scenario, target, timeS, state.HeightM, sight, model.ViewOf(sight, dwell.PriS), look, dwell, pulseSnr);
     }
 
     private static Budget Of(
-        Scenario scenario, Target target, double timeS, in TrackState state, TargetView view, in Look look, in Dwell dwell, double[] pulseSnr)
+        Scenario scenario, Target target, double timeS, double heightM, in Sight sight, TargetView view, in Look look, in Dwell dwell, double[] pulseSnr)
     {
         var radar = scenario.Radar;
         var beams = look.AzimuthBeamRatio * look.ElevationBeamRatio * look.EclipsingRatio;
@@ -82,8 +82,8 @@ public sealed record Budget
         {
             Target = target,
             TimeS = timeS,
-            Sight = new Sight { GroundM = Math.Sqrt(state.EastM * state.EastM + state.NorthM * state.NorthM), RangeM = look.RangeM, AzimuthRad = look.AzimuthRad, ElevationRad = look.ElevationRad, AboveHorizon = view != TargetView.BelowHorizon },
-            HeightM = state.HeightM,
+            Sight = sight,
+            HeightM = heightM,
             View = view,
             Received = received,
             ReceivedDbW = receivedDbW,

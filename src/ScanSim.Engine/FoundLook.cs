@@ -1,12 +1,15 @@
 namespace ScanSim.Engine;
 
-/// <summary>A look of the scan at hand, before cells are resolved.</summary>
+/// <summary>A look of the scan at hand, before cells are resolved. Small: a scan may hold hundreds of thousands.</summary>
 internal struct FoundLook
 {
     public Look Look;
-    public Dwell Dwell;
+
+    /// <summary>Counts from the scan's first dwell.</summary>
+    public int DwellInScan;
     public int TargetIndex;
     public int Cell;
+    public int TargetsInCell;
 
     /// <summary>Drawn RCS over mean; 1 where each pulse has its own.</summary>
     public double FluctuationRatio;
@@ -14,9 +17,5 @@ internal struct FoundLook
     /// <summary>Drawn statistic of its cell.</summary>
     public double Statistic;
 
-    public double Pd;
-
     public bool Detected;
-
-    public int TargetsInCell;
 }

@@ -13,8 +13,6 @@ public readonly record struct Look
 
     public required double ElevationRad { get; init; }
 
-    public required double RangeRateMps { get; init; }
-
     /// <summary>Target azimuth minus beam azimuth at the middle of the dwell, in [−π, π].</summary>
     public required double OffsetRad { get; init; }
 

@@ -65,13 +65,14 @@ public sealed class LookModel
     public Sight SightOf(in TrackState state)
     {
         var groundM = Math.Sqrt(state.EastM * state.EastM + state.NorthM * state.NorthM);
-        var (slantM, elevationRad) = earth.Geometry(antennaAltitudeM, state.HeightM, groundM);
+        var geometry = earth.Geometry(antennaAltitudeM, state.HeightM, groundM);
         return new Sight
         {
             GroundM = groundM,
-            RangeM = slantM,
+            RangeM = geometry.SlantRangeM,
             AzimuthRad = Angles.ToTurn(Math.Atan2(state.EastM, state.NorthM)),
-            ElevationRad = elevationRad,
+            ElevationRad = geometry.ElevationRad,
+            CosElevation = geometry.CosElevation,
             AboveHorizon = IsAboveHorizon(state.HeightM, groundM),
         };
     }
@@ -124,6 +125,7 @@ public sealed class LookModel
         return LookAt(sight, state, dwell, PeakSnrRatio(rcsM2, sight.RangeM, dwell.PriS), pulseSnrRatio);
     }
 
+    /// <summary>Radial speed of a target, positive when it recedes.</summary>
     public double RangeRateMps(in Sight sight, in TrackState state)
     {
         var groundRateMps = sight.GroundM > 0 ? (state.EastM * state.EastMps + state.NorthM * state.NorthMps) / sight.GroundM : 0;
@@ -159,14 +161,13 @@ public sealed class LookModel
     private Look LookAt(in Sight sight, in TrackState state, in Dwell dwell, double peakSnr, Span<double> pulseSnrRatio)
     {
         var offsetRad = Angles.ToHalfTurns(sight.AzimuthRad - dwell.BeamAzimuthRad);
-        var (azimuthSum, beamSum) = WeighPulses(sight, state, dwell, offsetRad, peakSnr, pulseSnrRatio);
+        var (azimuthSum, beamSum) = WeighPulses(sight, state, dwell, offsetRad, peakSnr, pulseSnrRatio[..dwell.Pulses]);
         return new Look
         {
             RangeM = sight.RangeM,
             ApparentRangeM = RangeAmbiguity.ApparentRangeM(sight.RangeM, dwell.PriS),
             AzimuthRad = sight.AzimuthRad,
             ElevationRad = sight.ElevationRad,
-            RangeRateMps = RangeRateMps(sight, state),
             OffsetRad = offsetRad,
             AzimuthBeamRatio = azimuthSum / dwell.Pulses,
             ElevationBeamRatio = beamSum / azimuthSum,
@@ -182,7 +183,7 @@ public sealed class LookModel
     private (double AzimuthSum, double BeamSum) WeighPulses(
         in Sight sight, in TrackState state, in Dwell dwell, double offsetRad, double peakSnr, Span<double> pulseSnrRatio)
     {
-        var cosElevation = Math.Cos(sight.ElevationRad);
+        var cosElevation = sight.CosElevation;
         var ground2 = sight.GroundM * sight.GroundM;
         var azimuthRate = ground2 > 0 ? (state.NorthM * state.EastMps - state.EastM * state.NorthMps) / ground2 : 0;
         var stepRad = (azimuthRate - dwell.BeamRateRadPerS) * dwell.PriS;
@@ -190,11 +191,14 @@ public sealed class LookModel
         var azimuth = patterns.Azimuth;
         var floor = patterns.FloorRatio;
         var firstRad = offsetRad - stepRad * (0.5 * (dwell.Pulses - 1));
+        var lastRad = firstRad + stepRad * (dwell.Pulses - 1);
+        var crossesBack = Math.Max(Math.Abs(firstRad), Math.Abs(lastRad)) > Math.PI;
         double azimuthSum = 0;
         double beamSum = 0;
-        for (var pulse = 0; pulse < dwell.Pulses; pulse++)
+        for (var pulse = 0; pulse < pulseSnrRatio.Length; pulse++)
         {
-            var azimuthGain = azimuth.GainRatio(Angles.ToHalfTurns(firstRad + stepRad * pulse) * cosElevation);
+            var pulseRad = firstRad + stepRad * pulse;
+            var azimuthGain = azimuth.GainRatio((crossesBack ? Angles.ToHalfTurns(pulseRad) : pulseRad) * cosElevation);
             var gain = Math.Max(azimuthGain * elevationGain, floor);
             azimuthSum += azimuthGain * azimuthGain;
             beamSum += gain * gain;

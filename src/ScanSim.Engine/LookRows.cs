@@ -1,6 +1,7 @@
 using ScanSim.Physics;
 using ScanSim.Physics.Detection;
 using ScanSim.Recordings;
+using ScanSim.Scenarios;
 
 namespace ScanSim.Engine;
 
@@ -13,7 +14,7 @@ internal sealed class LookRows(RunSetup setup)
     private readonly double[] pulseSnr = new double[setup.Timeline.Grid.Pulses.Max()];
     private readonly double radarDb = Decibels.FromRatio(setup.Model.RadarRatioM2);
 
-    public void Add(FoundLook[] looks, ReadOnlySpan<int> order, List<LookRow> rows)
+    public void Add(FoundLook[] looks, ReadOnlySpan<int> order, Dwell[] dwells, List<LookRow> rows)
     {
         if (setup.Options.Looks == LooksKept.None)
         {
@@ -30,7 +31,7 @@ internal sealed class LookRows(RunSetup setup)
         {
             if (all || best[looks[index].TargetIndex] == index)
             {
-                rows.Add(RowOf(looks[index]));
+                rows.Add(RowOf(looks[index], dwells[looks[index].DwellInScan]));
             }
         }
     }
@@ -51,10 +52,11 @@ internal sealed class LookRows(RunSetup setup)
     private static bool IsBetter(in FoundLook a, in FoundLook b) =>
         a.Detected != b.Detected ? a.Detected : a.Look.SnrRatio > b.Look.SnrRatio;
 
-    private LookRow RowOf(in FoundLook found)
+    private LookRow RowOf(in FoundLook found, in Dwell dwell)
     {
         var target = setup.Targets[found.TargetIndex];
-        var detector = setup.Detectors[found.Dwell.PrfIndex];
+        var detector = setup.Detectors[dwell.PrfIndex];
+        var state = target.Track.At(dwell.MiddleS);
         ref readonly var look = ref found.Look;
         var azimuthDb = Decibels.FromRatio(look.AzimuthBeamRatio);
         var elevationDb = Decibels.FromRatio(look.ElevationBeamRatio);
@@ -63,16 +65,16 @@ internal sealed class LookRows(RunSetup setup)
         var perPulse = target.Fluctuation is FluctuationCase.Case2 or FluctuationCase.Case4;
         return new LookRow
         {
-            TimeS = found.Dwell.MiddleS,
-            Scan = found.Dwell.Scan,
-            Dwell = found.Dwell.Index,
+            TimeS = dwell.MiddleS,
+            Scan = dwell.Scan,
+            Dwell = dwell.Index,
             Target = target.Id,
             RangeM = look.RangeM,
             AzimuthDeg = look.AzimuthRad * Angles.DegPerRad,
             ElevationDeg = look.ElevationRad * Angles.DegPerRad,
-            RadialSpeedMps = look.RangeRateMps,
-            BeamAzimuthDeg = found.Dwell.BeamAzimuthRad * Angles.DegPerRad,
-            Pulses = found.Dwell.Pulses,
+            RadialSpeedMps = setup.Model.RangeRateMps(setup.Model.SightOf(state), state),
+            BeamAzimuthDeg = dwell.BeamAzimuthRad * Angles.DegPerRad,
+            Pulses = dwell.Pulses,
             RadarDb = radarDb,
             RcsDb = target.RcsDb,
             SpreadingDb = spreadingDb,
@@ -80,7 +82,7 @@ internal sealed class LookRows(RunSetup setup)
             ElevationBeamDb = elevationDb,
             EclipsingDb = eclipsingDb,
             SnrDb = radarDb + target.RcsDb + spreadingDb + azimuthDb + elevationDb + eclipsingDb,
-            Pd = ProbabilityOf(target, detector, found),
+            Pd = ProbabilityOf(target, detector, found, dwell, state),
             FluctuationDb = perPulse ? null : Decibels.FromRatio(found.FluctuationRatio),
             StatisticDb = Decibels.FromRatio(found.Statistic / detector.Threshold),
             Detected = found.Detected,
@@ -90,12 +92,12 @@ internal sealed class LookRows(RunSetup setup)
     }
 
     /// <summary>Computed only for looks that are kept; the pulses of unequal SNR are then worked out once more.</summary>
-    private double ProbabilityOf(RunTarget target, Detector detector, in FoundLook found)
+    private double ProbabilityOf(RunTarget target, Detector detector, in FoundLook found, in Dwell dwell, in TrackState state)
     {
-        var pulses = pulseSnr.AsSpan(0, found.Dwell.Pulses);
+        var pulses = pulseSnr.AsSpan(0, dwell.Pulses);
         if (target.Fluctuation is FluctuationCase.Case2 or FluctuationCase.Case4)
         {
-            setup.Model.TryLook(target.RcsM2, target.Track.At(found.Dwell.MiddleS), found.Dwell, pulses, out _);
+            setup.Model.TryLook(target.RcsM2, state, dwell, pulses, out _);
         }
 
         return detector.Probability(target.Fluctuation, found.Look.SnrRatio, pulses);

@@ -4,20 +4,16 @@ using ScanSim.Scenarios;
 
 namespace ScanSim.Engine;
 
-/// <summary>What the engine can count: addresses of draws are 32 bits wide, a scan's looks are sorted by packed keys.</summary>
+/// <summary>What the engine can count: addresses of draws are 32 bits wide, range cells and dwells of a scan are counted in buffers.</summary>
 public static class RunLimits
 {
     public const long MostDwells = uint.MaxValue;
-    public const int MostDwellsInScan = 1 << DwellBits;
-    public const int MostCells = 1 << CellBits;
-    public const int MostTargets = 1 << TargetBits;
+    public const int MostDwellsInScan = 1 << 20;
+    public const int MostCells = 1 << 24;
+    public const int MostTargets = 1 << 20;
 
     /// <summary>One less than the largest draw index, which stands for the pass before the first turn.</summary>
     public const int MostScans = int.MaxValue - 1;
-
-    internal const int TargetBits = 20;
-    internal const int CellBits = 24;
-    internal const int DwellBits = 20;
 
     /// <summary>The first limit that a scenario breaks, in words for the user; null when it can be run.</summary>
     public static string? Broken(Scenario scenario)

@@ -15,6 +15,10 @@ internal sealed class ScanWorker
     private FoundLook[] looks = new FoundLook[256];
     private ulong[] keys = new ulong[256];
     private int[] order = new int[256];
+    private int[] dwellEnds = [];
+    private Dwell[] dwells = [];
+    private long firstDwell;
+    private int dwellCount;
     private int count;
 
     public ScanWorker(RunSetup setup)
@@ -29,11 +33,29 @@ internal sealed class ScanWorker
     public void Compute(int scan, ScanResult result)
     {
         result.Begin(scan);
+        ListDwells(scan);
         FindLooks(scan, result);
-        ResolveCells(scan, result);
-        AddFalseAlarms(scan, result);
-        lookRows.Add(looks, order.AsSpan(0, count), result.Looks);
+        ResolveCells(result);
+        AddFalseAlarms(result);
+        lookRows.Add(looks, order.AsSpan(0, count), dwells, result.Looks);
         result.LookCount = count;
+    }
+
+    /// <summary>The scan's dwells, worked out once for all targets.</summary>
+    private void ListDwells(int scan)
+    {
+        firstDwell = setup.Timeline.FirstDwell(scan);
+        dwellCount = (int)(setup.Timeline.FirstDwell(scan + 1) - firstDwell);
+        if (dwells.Length < dwellCount)
+        {
+            dwells = new Dwell[dwellCount];
+            dwellEnds = new int[dwellCount];
+        }
+
+        for (var i = 0; i < dwellCount; i++)
+        {
+            dwells[i] = setup.Timeline.DwellAt(scan, firstDwell + i);
+        }
     }
 
     private void FindLooks(int scan, ScanResult result)
@@ -56,7 +78,7 @@ internal sealed class ScanWorker
             {
                 for (var dwell = range.First; dwell < range.End; dwell++)
                 {
-                    TryDwell(index, target, setup.Timeline.DwellAt(scan, dwell));
+                    TryDwell(index, target, dwells[dwell - firstDwell]);
                 }
             }
         }
@@ -69,12 +91,6 @@ internal sealed class ScanWorker
             return;
         }
 
-        var state = target.Track.At(dwell.MiddleS);
-        if (!setup.Model.TryLook(target.RcsM2, state, dwell, pulseSnr, out var look))
-        {
-            return;
-        }
-
         if (count == looks.Length)
         {
             Array.Resize(ref looks, 2 * count);
@@ -82,43 +98,78 @@ internal sealed class ScanWorker
             Array.Resize(ref order, 2 * count);
         }
 
-        ref var found = ref looks[count++];
-        found = new FoundLook { Look = look, Dwell = dwell, TargetIndex = targetIndex, Cell = (int)(look.ApparentRangeM / setup.CellM), TargetsInCell = 1 };
-        resolver.DrawAlone(ref found, pulseSnr.AsSpan(0, dwell.Pulses));
-    }
-
-    /// <summary>Puts the looks in order of dwell, cell and target, and joins those that share a cell.</summary>
-    private void ResolveCells(int scan, ScanResult result)
-    {
-        var first = setup.Timeline.FirstDwell(scan);
-        for (var i = 0; i < count; i++)
+        ref var found = ref looks[count];
+        if (!setup.Model.TryLook(target.RcsM2, target.Track.At(dwell.MiddleS), dwell, pulseSnr, out found.Look))
         {
-            keys[i] = SortKey(looks[i].Dwell.Index - first, looks[i].Cell, looks[i].TargetIndex);
-            order[i] = i;
+            return;
         }
 
-        Array.Sort(keys, order, 0, count);
-        for (var from = 0; from < count;)
+        count++;
+        found.DwellInScan = (int)(dwell.Index - firstDwell);
+        found.TargetIndex = targetIndex;
+        found.Cell = (int)(found.Look.ApparentRangeM / setup.CellM);
+        found.TargetsInCell = 1;
+        resolver.DrawAlone(ref found, dwell, pulseSnr.AsSpan(0, dwell.Pulses));
+    }
+
+    /// <summary>
+    /// Puts the looks in order of dwell, cell and target, joins those that share a cell, and collects the hits. By counting into dwells,
+    /// then by sorting keys within each; a key holds all that most looks need, so that their memory is not touched again.
+    /// </summary>
+    private void ResolveCells(ScanResult result)
+    {
+        var ends = dwellEnds.AsSpan(0, dwellCount);
+        ends.Clear();
+        for (var i = 0; i < count; i++)
         {
-            var to = from + 1;
-            while (to < count && keys[to] >> RunLimits.TargetBits == keys[from] >> RunLimits.TargetBits)
+            ends[looks[i].DwellInScan]++;
+        }
+
+        for (var dwell = 1; dwell < dwellCount; dwell++)
+        {
+            ends[dwell] += ends[dwell - 1];
+        }
+
+        for (var i = count - 1; i >= 0; i--)
+        {
+            keys[--ends[looks[i].DwellInScan]] = CellKey.Of(looks[i].Cell, i, looks[i].Detected);
+        }
+
+        // The ends have become starts.
+        for (var dwell = 0; dwell < dwellCount; dwell++)
+        {
+            ResolveDwell(dwells[dwell], ends[dwell], dwell + 1 < dwellCount ? ends[dwell + 1] : count, result.Hits);
+        }
+    }
+
+    private void ResolveDwell(in Dwell dwell, int start, int end, List<Hit> hits)
+    {
+        keys.AsSpan(start, end - start).Sort();
+        for (var from = start; from < end;)
+        {
+            var to = from;
+            do
             {
+                order[to] = CellKey.Index(keys[to]);
                 to++;
             }
+            while (to < end && CellKey.SameCell(keys[to], keys[from]));
 
-            resolver.Resolve(looks, order.AsSpan(from, to - from), result.Hits);
+            if (to - from > 1 || CellKey.Detected(keys[from]))
+            {
+                resolver.Resolve(looks, order.AsSpan(from, to - from), dwell, hits);
+            }
+
             from = to;
         }
     }
 
-    private void AddFalseAlarms(int scan, ScanResult result)
+    private void AddFalseAlarms(ScanResult result)
     {
         var hits = result.Hits;
         var targetHits = hits.Count;
-        var end = setup.Timeline.FirstDwell(scan + 1);
-        for (var index = setup.Timeline.FirstDwell(scan); index < end; index++)
+        foreach (ref readonly var dwell in dwells.AsSpan(0, dwellCount))
         {
-            var dwell = setup.Timeline.DwellAt(scan, index);
             if (!setup.Timeline.IsBlanked(dwell.BeamAzimuthRad))
             {
                 FalseAlarms.Draw(setup, dwell, hits);
@@ -136,8 +187,4 @@ internal sealed class ScanWorker
             result.FalseHitCount += hit.Kind == EchoKind.Noise ? 1 : 0;
         }
     }
-
-    /// <summary>Room is kept by <see cref="RunLimits"/>.</summary>
-    private static ulong SortKey(long dwellInScan, int cell, int target) =>
-        ((ulong)dwellInScan << (RunLimits.CellBits + RunLimits.TargetBits)) | ((ulong)cell << RunLimits.TargetBits) | (uint)target;
 }

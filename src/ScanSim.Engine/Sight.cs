@@ -15,5 +15,7 @@ public readonly record struct Sight
 
     public required double ElevationRad { get; init; }
 
+    public required double CosElevation { get; init; }
+
     public required bool AboveHorizon { get; init; }
 }

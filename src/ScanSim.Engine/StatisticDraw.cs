@@ -26,35 +26,33 @@ internal static class StatisticDraw
         return inPhase * inPhase + 0.5 * quadrature * quadrature + draws.NextGamma(pulses - 1);
     }
 
-    /// <summary>z for case 2: each pulse's sample is complex normal with variance 1 + SNR.</summary>
-    public static double OfCase2(ReadOnlySpan<double> pulseSnrRatio, ref DrawStream draws)
+    /// <summary>z for cases 2 and 4: each pulse has an RCS of its own, and its own mean SNR.</summary>
+    /// <remarks>
+    /// One pulse's moment generating function is 1/(1 − mt) with m = 1 + S for case 2, (1 − t)/(1 − mt)² with m = 1 + S/2 for case 4.
+    /// Since (1 − t)/(1 − mt) = 1/m + (1 − 1/m)/(1 − mt), each is that of noise, 1/(1 − t), plus one (case 2) or two (case 4)
+    /// exponentials of mean m that are there with probability 1 − 1/m each. So z is the sum of n noise samples, Gamma(n), plus those
+    /// exponentials: exact, and most of them are absent when the signal is weak. Which come is found run by run: the next comes
+    /// where the probability of none since the last one, the product of 1/m, falls below a uniform number.
+    /// </remarks>
+    public static double OfPulseFluctuation(FluctuationCase fluctuation, ReadOnlySpan<double> pulseSnrRatio, ref DrawStream draws)
     {
-        double sum = 0;
+        var stages = fluctuation == FluctuationCase.Case2 ? 1 : 2;
+        var sum = draws.NextGamma(pulseSnrRatio.Length);
+        var product = 1.0;
+        var limit = draws.NextUniform();
         foreach (var snr in pulseSnrRatio)
         {
-            sum += (1 + snr) * draws.NextExponential();
-        }
-
-        return sum;
-    }
-
-    /// <summary>
-    /// z for case 4. One pulse's characteristic function is (1 − t)/(1 − ct)² with c = 1 + SNR/2: a mixture of c·Gamma(1)
-    /// (probability 1/c) and c·Gamma(2).
-    /// </summary>
-    public static double OfCase4(ReadOnlySpan<double> pulseSnrRatio, ref DrawStream draws)
-    {
-        double sum = 0;
-        foreach (var snr in pulseSnrRatio)
-        {
-            var c = 1 + 0.5 * snr;
-            var sample = draws.NextExponential();
-            if (draws.NextUniform() * c > 1)
+            var mean = 1 + snr / stages;
+            for (var stage = 0; stage < stages; stage++)
             {
-                sample += draws.NextExponential();
+                product *= mean;
+                if (product * limit > 1)
+                {
+                    sum += mean * draws.NextExponential();
+                    product = 1;
+                    limit = draws.NextUniform();
+                }
             }
-
-            sum += c * sample;
         }
 
         return sum;

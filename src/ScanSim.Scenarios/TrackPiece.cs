@@ -6,6 +6,10 @@ namespace ScanSim.Scenarios;
 /// <remarks>Heading clockwise from north; turn rate positive to the right. default(TrackPiece) is a still point of zero duration.</remarks>
 public readonly record struct TrackPiece
 {
+    /// <summary>Of <see cref="HeadingRad"/>, kept because each look asks for a state.</summary>
+    private readonly double headingSine;
+    private readonly double headingCosine;
+
     public required double StartS { get; init; }
 
     public required double EndS { get; init; }
@@ -16,7 +20,15 @@ public readonly record struct TrackPiece
 
     public required double HeightM { get; init; }
 
-    public required double HeadingRad { get; init; }
+    public required double HeadingRad
+    {
+        get;
+        init
+        {
+            field = value;
+            (headingSine, headingCosine) = Math.SinCos(value);
+        }
+    }
 
     public required double SpeedMps { get; init; }
 
@@ -32,7 +44,7 @@ public readonly record struct TrackPiece
     {
         var t = timeS - StartS;
         var heightM = HeightM + ClimbMps * t;
-        var (sin0, cos0) = Math.SinCos(HeadingRad);
+        var (sin0, cos0) = (headingSine, headingCosine);
         if (TurnRateRadPerS == 0)
         {
             var pathM = (SpeedMps + 0.5 * AccelerationMps2 * t) * t;

@@ -46,7 +46,9 @@ public sealed class SampledPattern
     public double GainRatio(double offsetRad)
     {
         double position = offsetRad * stepsPerRad + centre;
-        int index = (int)position;
+
+        // In range by the wrapping: no need for the saturating conversion of a cast.
+        int index = double.ConvertToIntegerNative<int>(position);
         double below = samples[index];
         return below + (position - index) * (samples[index + 1] - below);
     }

@@ -8,7 +8,7 @@ namespace ScanSim.Physics.Draws;
 /// of four words; a rejection loop runs on inside its own address and disturbs no other. No allocation.
 /// The default value is the stream of seed 0 and the default address. A copy repeats the draws that follow the copying.
 /// Distributions are exact but for the rounding of doubles and the 2⁻⁵² steps of the uniform numbers. Their bits are the same
-/// for the same platform; Log and SinCos may differ in the last bit between systems.
+/// for the same platform; Exp and Log may differ in the last bit between systems.
 /// </remarks>
 public struct DrawStream
 {
@@ -27,8 +27,6 @@ public struct DrawStream
     private readonly uint key1;
     private uint nextBlock;
     private int wordsLeft;
-    private bool hasNormal;
-    private double secondNormal;
     private Words words;
 
     public DrawStream(ulong seed, DrawAddress address)
@@ -54,43 +52,25 @@ public struct DrawStream
         return word;
     }
 
+    /// <summary>64 even bits: two words, the first one high.</summary>
+    public ulong NextUInt64()
+    {
+        if (wordsLeft < 2)
+        {
+            ulong high = NextUInt32();
+            return (high << 32) | NextUInt32();
+        }
+
+        int next = WordCount - wordsLeft;
+        wordsLeft -= 2;
+        return ((ulong)words[next] << 32) | words[next + 1];
+    }
+
     /// <summary>Uniform in the open interval (0, 1): one of the 2⁵² midpoints (i + ½) 2⁻⁵².</summary>
-    public double NextUniform()
-    {
-        ulong high;
-        ulong low;
-        if (wordsLeft >= 2)
-        {
-            int next = WordCount - wordsLeft;
-            high = words[next];
-            low = words[next + 1];
-            wordsLeft -= 2;
-        }
-        else
-        {
-            high = NextUInt32();
-            low = NextUInt32();
-        }
+    public double NextUniform() => ((NextUInt64() >> 12) + 0.5) * UniformStep;
 
-        return ((((high << 32) | low) >> 12) + 0.5) * UniformStep;
-    }
-
-    /// <summary>Normal with mean 0 and variance 1.</summary>
-    /// <remarks>Source: G. E. P. Box and M. E. Muller, Ann. Math. Stat. 29 (1958), p. 610. Of a pair the second is kept. |x| ≤ 8.6.</remarks>
-    public double NextNormal()
-    {
-        if (hasNormal)
-        {
-            hasNormal = false;
-            return secondNormal;
-        }
-
-        double radius = Math.Sqrt(-2.0 * Math.Log(NextUniform()));
-        (double sine, double cosine) = Math.SinCos(2.0 * Math.PI * NextUniform());
-        secondNormal = radius * sine;
-        hasNormal = true;
-        return radius * cosine;
-    }
+    /// <summary>Normal with mean 0 and variance 1. Method: <see cref="NormalDraw"/>.</summary>
+    public double NextNormal() => NormalDraw.Next(ref this);
 
     /// <summary>Exponential with mean 1: −ln of a uniform number. At most 36.8.</summary>
     public double NextExponential() => -Math.Log(NextUniform());

@@ -13,7 +13,13 @@ public static class Eclipsing
     /// </remarks>
     public static double PowerRatio(double rangeM, double pulseWidthS, double priS)
     {
-        double delayS = 2.0 * rangeM / Constants.SpeedOfLightMps % priS;
+        double delayS = 2.0 * rangeM / Constants.SpeedOfLightMps;
+        if (delayS >= pulseWidthS && delayS + pulseWidthS <= priS)
+        {
+            return 1.0;
+        }
+
+        delayS %= priS;
         double heardS = Math.Min(delayS + pulseWidthS, priS) - Math.Max(delayS, pulseWidthS);
         double share = Math.Clamp(heardS / pulseWidthS, 0.0, 1.0);
         return share * share;

@@ -11,5 +11,9 @@ public static class RangeAmbiguity
     public static double UnambiguousRangeM(double priS) => 0.5 * Constants.SpeedOfLightMps * priS;
 
     /// <summary>Range at which the echo of a true range appears, in [0, unambiguous range).</summary>
-    public static double ApparentRangeM(double rangeM, double priS) => rangeM % UnambiguousRangeM(priS);
+    public static double ApparentRangeM(double rangeM, double priS)
+    {
+        double unambiguousM = UnambiguousRangeM(priS);
+        return rangeM < unambiguousM ? rangeM : rangeM % unambiguousM;
+    }
 }
