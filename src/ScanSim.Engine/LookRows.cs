@@ -1,3 +1,4 @@
+using System.Collections.Immutable;
 using ScanSim.Physics;
 using ScanSim.Physics.Detection;
 using ScanSim.Recordings;
@@ -12,6 +13,7 @@ internal sealed class LookRows(RunSetup setup)
 
     private readonly int[] best = new int[setup.Targets.Length];
     private readonly double[] pulseSnr = new double[setup.Timeline.Grid.Pulses.Max()];
+    private readonly ImmutableArray<double> centredBeamRatio = [.. Enumerable.Range(0, setup.Detectors.Length).Select(prf => CentredBeamRatio(setup, prf))];
     private readonly double radarDb = Decibels.FromRatio(setup.Model.RadarRatioM2);
 
     public void Add(FoundLook[] looks, ReadOnlySpan<int> order, Dwell[] dwells, List<LookRow> rows)
@@ -86,7 +88,7 @@ internal sealed class LookRows(RunSetup setup)
             FluctuationDb = perPulse ? null : Decibels.FromRatio(found.FluctuationRatio),
             StatisticDb = Decibels.FromRatio(found.Statistic / detector.Threshold),
             Detected = found.Detected,
-            LostTo = ReasonOf(target, detector, found),
+            LostTo = ReasonOf(target, detector, found, centredBeamRatio[dwell.PrfIndex]),
             TargetsInCell = found.TargetsInCell,
         };
     }
@@ -103,7 +105,22 @@ internal sealed class LookRows(RunSetup setup)
         return detector.Probability(target.Fluctuation, found.Look.SnrRatio, pulses);
     }
 
-    private static LossReason ReasonOf(RunTarget target, Detector detector, in FoundLook found)
+    /// <summary>Mean two-way azimuth pattern of a dwell whose middle points at a target on the horizon: the loss that no dwell escapes.</summary>
+    private static double CentredBeamRatio(RunSetup setup, int prf)
+    {
+        var pulses = setup.Timeline.Grid.Pulses[prf];
+        var stepRad = setup.Timeline.BeamSpeedRadPerS * setup.Timeline.Grid.PriPs[prf] / DwellGrid.PicosecondsPerSecond;
+        double sum = 0;
+        for (var pulse = 0; pulse < pulses; pulse++)
+        {
+            var gain = setup.Model.Patterns.Azimuth.GainRatio(Math.Clamp(stepRad * (pulse - 0.5 * (pulses - 1)), -Math.PI, Math.PI));
+            sum += gain * gain;
+        }
+
+        return sum / pulses;
+    }
+
+    private static LossReason ReasonOf(RunTarget target, Detector detector, in FoundLook found, double centredRatio)
     {
         if (found.Detected)
         {
@@ -117,16 +134,18 @@ internal sealed class LookRows(RunSetup setup)
             return found.TargetsInCell > 1 ? LossReason.SharedCell : LossReason.Fluctuation;
         }
 
-        if (look.SnrRatio / (look.AzimuthBeamRatio * look.ElevationBeamRatio * look.EclipsingRatio) < needed)
+        // What the same dwell would give with the beam's centre on the target, in azimuth and elevation, and all of the echo heard.
+        var offAzimuthRatio = Math.Min(1, look.AzimuthBeamRatio / centredRatio);
+        if (look.SnrRatio / (offAzimuthRatio * look.ElevationBeamRatio * look.EclipsingRatio) < needed)
         {
             return LossReason.Range;
         }
 
-        if (look.EclipsingRatio <= look.AzimuthBeamRatio && look.EclipsingRatio <= look.ElevationBeamRatio)
+        if (look.EclipsingRatio <= offAzimuthRatio && look.EclipsingRatio <= look.ElevationBeamRatio)
         {
             return LossReason.Eclipsing;
         }
 
-        return look.ElevationBeamRatio < look.AzimuthBeamRatio ? LossReason.ElevationBeam : LossReason.AzimuthBeam;
+        return look.ElevationBeamRatio < offAzimuthRatio ? LossReason.ElevationBeam : LossReason.AzimuthBeam;
     }
 }

@@ -6,7 +6,7 @@ public enum LossReason
     /// <summary>The look was detected.</summary>
     None = 0,
 
-    /// <summary>Too weak even at the beam's peak and without eclipsing.</summary>
+    /// <summary>Too weak even with the dwell centred on the target and without eclipsing.</summary>
     Range = 1,
 
     /// <summary>Strong enough, but too far off the beam's azimuth.</summary>

@@ -84,6 +84,23 @@ public class LookModelTests
     }
 
     [Fact]
+    public void A_missed_look_names_the_term_it_was_lost_to()
+    {
+        // Weak and centred; strong and straddled by two dwells; strong and 24 degrees up; strong and under its own pulse.
+        var scenario = TestScenario.With(
+            TestScenario.Still("weak", 50 * 1.2 + 0.56, 20_000, 0.5, 0),
+            TestScenario.Still("between", 100 * 1.2 + 1.16, 9_000, 0.16, 0),
+            TestScenario.Still("high", 150 * 1.2 + 0.56, 5_000, 20, 0, heightM: 2_230),
+            TestScenario.Still("near", 200 * 1.2 + 0.56, 2, 3e-14, 0, heightM: 30));
+        var best = CollectingSink.Of(scenario, new RunOptions { Looks = LooksKept.Best }).Looks.Where(l => l.Scan == 5).ToDictionary(l => l.Target);
+        Assert.All(best.Values, l => Assert.True(l.Pd < 0.5, $"{l.Target} has Pd {l.Pd}, SNR {l.SnrDb}"));
+        Assert.Equal(LossReason.Range, best["weak"].LostTo);
+        Assert.Equal(LossReason.AzimuthBeam, best["between"].LostTo);
+        Assert.Equal(LossReason.ElevationBeam, best["high"].LostTo);
+        Assert.Equal(LossReason.Eclipsing, best["near"].LostTo);
+    }
+
+    [Fact]
     public void Radial_speed_is_the_rate_of_the_slant_range()
     {
         var scenario = TestScenario.With(TestScenario.Moving("t", 10, 9_000, 250, 90, 100, 0, heightM: 900));
