@@ -103,18 +103,20 @@ public sealed class LookModel
     {
         look = default;
         var sight = SightOf(state);
-        if (!sight.AboveHorizon || RangeAmbiguity.ApparentRangeM(sight.RangeM, dwell.PriS) > instrumentedRangeM)
+        var apparentM = RangeAmbiguity.ApparentRangeM(sight.RangeM, dwell.PriS);
+        if (!sight.AboveHorizon || apparentM > instrumentedRangeM)
         {
             return false;
         }
 
-        var peakSnr = PeakSnrRatio(rcsM2, sight.RangeM, dwell.PriS);
+        var eclipsing = Eclipsing.PowerRatio(sight.RangeM, pulseWidthS, dwell.PriS);
+        var peakSnr = PeakSnrRatio(rcsM2, sight.RangeM) * eclipsing;
         if (!(peakSnr * dwell.Pulses >= SummedSnrFloorRatio))
         {
             return false;
         }
 
-        look = LookAt(sight, state, dwell, peakSnr, pulseSnrRatio);
+        look = LookAt(sight, state, dwell, apparentM, eclipsing, peakSnr, pulseSnrRatio);
         return look.SnrRatio * dwell.Pulses >= SummedSnrFloorRatio;
     }
 
@@ -122,7 +124,9 @@ public sealed class LookModel
     public Look LookAt(double rcsM2, in TrackState state, in Dwell dwell, Span<double> pulseSnrRatio)
     {
         var sight = SightOf(state);
-        return LookAt(sight, state, dwell, PeakSnrRatio(rcsM2, sight.RangeM, dwell.PriS), pulseSnrRatio);
+        var apparentM = RangeAmbiguity.ApparentRangeM(sight.RangeM, dwell.PriS);
+        var eclipsing = Eclipsing.PowerRatio(sight.RangeM, pulseWidthS, dwell.PriS);
+        return LookAt(sight, state, dwell, apparentM, eclipsing, PeakSnrRatio(rcsM2, sight.RangeM) * eclipsing, pulseSnrRatio);
     }
 
     /// <summary>Radial speed of a target, positive when it recedes.</summary>
@@ -138,8 +142,7 @@ public sealed class LookModel
     /// </summary>
     internal double WidestOffsetRad(double rcsM2, double nearestM, double highestElevationRad, int pulses)
     {
-        var nearest2 = nearestM * nearestM;
-        var summedSnr = RadarRatioM2 * rcsM2 / (nearest2 * nearest2) * pulses;
+        var summedSnr = PeakSnrRatio(rcsM2, nearestM) * pulses;
         var neededRatio = Math.Sqrt(SummedSnrFloorRatio / summedSnr);
         if (neededRatio > 1)
         {
@@ -151,27 +154,28 @@ public sealed class LookModel
         return offsetRad >= Math.PI * cosElevation ? Math.PI : offsetRad / cosElevation;
     }
 
-    /// <summary>SNR per pulse at the peak of the beam, eclipsing included.</summary>
-    private double PeakSnrRatio(double rcsM2, double rangeM, double priS)
+    /// <summary>SNR per pulse at the peak of the beam, the whole echo heard.</summary>
+    private double PeakSnrRatio(double rcsM2, double rangeM)
     {
         var range2 = rangeM * rangeM;
-        return RadarRatioM2 * rcsM2 / (range2 * range2) * Eclipsing.PowerRatio(rangeM, pulseWidthS, priS);
+        return RadarRatioM2 * rcsM2 / (range2 * range2);
     }
 
-    private Look LookAt(in Sight sight, in TrackState state, in Dwell dwell, double peakSnr, Span<double> pulseSnrRatio)
+    private Look LookAt(
+        in Sight sight, in TrackState state, in Dwell dwell, double apparentM, double eclipsingRatio, double peakSnr, Span<double> pulseSnrRatio)
     {
         var offsetRad = Angles.ToHalfTurns(sight.AzimuthRad - dwell.BeamAzimuthRad);
         var (azimuthSum, beamSum) = WeighPulses(sight, state, dwell, offsetRad, peakSnr, pulseSnrRatio[..dwell.Pulses]);
         return new Look
         {
             RangeM = sight.RangeM,
-            ApparentRangeM = RangeAmbiguity.ApparentRangeM(sight.RangeM, dwell.PriS),
+            ApparentRangeM = apparentM,
             AzimuthRad = sight.AzimuthRad,
             ElevationRad = sight.ElevationRad,
             OffsetRad = offsetRad,
             AzimuthBeamRatio = azimuthSum / dwell.Pulses,
             ElevationBeamRatio = beamSum / azimuthSum,
-            EclipsingRatio = Eclipsing.PowerRatio(sight.RangeM, pulseWidthS, dwell.PriS),
+            EclipsingRatio = eclipsingRatio,
             SnrRatio = peakSnr * beamSum / dwell.Pulses,
         };
     }

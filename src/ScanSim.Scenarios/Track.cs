@@ -30,7 +30,7 @@ public sealed record Track
         while (low < high)
         {
             var middle = (low + high + 1) >> 1;
-            if (Pieces[middle].StartS <= timeS)
+            if (Pieces.ItemRef(middle).StartS <= timeS)
             {
                 low = middle;
             }
@@ -40,6 +40,6 @@ public sealed record Track
             }
         }
 
-        return Pieces[low].At(timeS);
+        return Pieces.ItemRef(low).At(timeS);
     }
 }
