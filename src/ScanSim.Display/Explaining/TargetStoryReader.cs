@@ -61,12 +61,14 @@ public sealed class TargetStoryReader(Recording recording, Scenario scenario, Lo
         index = index < 0 ? ~index : index;
         var hasPlot = index < plotTimesS.Count && plotTimesS[index] <= timeS + reachS;
         var (outcome, reason) = OutcomeOf(truth, best, hasPlot);
+        ImmutableArray<LookExplanation> told = [.. looks.Where(l => ReferenceEquals(l, best) || l.Row.Detected || Math.Abs(l.Row.TimeS - timeS) <= reachS)];
         return new TargetPass
         {
             Scan = scan,
             TimeS = timeS,
             Truth = truth,
-            Looks = [.. looks],
+            Looks = told,
+            SideLooks = looks.Count - told.Length,
             Best = best,
             HasPlot = hasPlot,
             Outcome = outcome,
