@@ -137,7 +137,7 @@ internal static class ExplainReport
         PassOutcome.ElevationBeam => "missed: off the beam's elevation",
         PassOutcome.Eclipsing => "missed: eclipsed",
         PassOutcome.Chance => "missed by chance (Pd 0.5 or more)",
-        PassOutcome.SharedCell => "cancelled by another target in its cell",
+        PassOutcome.SharedCell => "missed in one cell with another target",
         PassOutcome.HitWithoutPlot => "hit, but no plot",
         PassOutcome.TooWeakForLook => "too weak for a look",
         PassOutcome.NoDwell => "no dwell met it",

@@ -11,6 +11,9 @@ public sealed class LookExplainer
 {
     public const double UsualPd = 0.9;
 
+    /// <summary>Signal, summed over the pulses, to the noise of one pulse, below which a run computes no look (docs/engine.md).</summary>
+    public const double SummedSnrFloorDb = -20;
+
     private const double EvenOdds = 0.5;
 
     private readonly Scenario scenario;
