@@ -1,6 +1,4 @@
 using System.Buffers.Binary;
-using System.Runtime.InteropServices;
-using SkiaSharp;
 
 namespace ScanSim.Display.Films;
 
@@ -14,9 +12,6 @@ internal sealed class WebpEncoder : IFilmEncoder
 
     /// <summary>The animation flag and the alpha flag of the VP8X chunk.</summary>
     private const byte AnimationWithAlpha = 0x02 | 0x10;
-
-    /// <summary>How hard the encoder tries, 0 to 100. More than this takes longer without getting smaller by much (docs/film.md).</summary>
-    private const float Effort = 20;
 
     private readonly Stream into;
     private readonly FilmPlan plan;
@@ -42,15 +37,13 @@ internal sealed class WebpEncoder : IFilmEncoder
     public ReadOnlyMemory<byte> Encode(int index, FrameBuffer frame, FrameBuffer? before)
     {
         var area = ChangedArea.Of(frame, before).FromEven();
-        using var bitmap = new SKBitmap(new SKImageInfo(area.Width, area.Height, SKColorType.Rgba8888, SKAlphaType.Unpremul));
-        CopyChanged(frame, before, area, MemoryMarshal.Cast<byte, uint>(bitmap.GetPixelSpan()));
-        using var pixels = bitmap.PeekPixels();
-        using var still = pixels.Encode(new SKWebpEncoderOptions(SKWebpEncoderCompression.Lossless, Effort))
-            ?? throw new PictureException($"Frame {index} could not be encoded as WebP.");
-        var image = ImageChunk(still.AsSpan());
-        var chunk = new byte[RiffHeaderBytes + FrameHeaderBytes + image.Length];
+        var pixels = new uint[area.Width * area.Height];
+        CopyChanged(frame, before, area, pixels);
+        var image = LosslessWebp.Encode(pixels, area.Width);
+        var length = FrameHeaderBytes + RiffHeaderBytes + image.Length + (image.Length & 1);
+        var chunk = new byte[RiffHeaderBytes + length];
         "ANMF"u8.CopyTo(chunk);
-        BinaryPrimitives.WriteInt32LittleEndian(chunk.AsSpan(4), FrameHeaderBytes + image.Length);
+        BinaryPrimitives.WriteInt32LittleEndian(chunk.AsSpan(4), length);
         var head = chunk.AsSpan(RiffHeaderBytes, FrameHeaderBytes);
         WriteUInt24(head, area.Left / 2);
         WriteUInt24(head[3..], area.Top / 2);
@@ -58,7 +51,10 @@ internal sealed class WebpEncoder : IFilmEncoder
         WriteUInt24(head[9..], area.Height - 1);
         WriteUInt24(head[12..], plan.ShownAt(index + 1, 1000) - plan.ShownAt(index, 1000));
         // The last byte stays 0: blend over what is there, and leave it when the next frame comes.
-        image.CopyTo(chunk.AsSpan(RiffHeaderBytes + FrameHeaderBytes));
+        var still = chunk.AsSpan(RiffHeaderBytes + FrameHeaderBytes);
+        "VP8L"u8.CopyTo(still);
+        BinaryPrimitives.WriteInt32LittleEndian(still[4..], image.Length);
+        image.CopyTo(still[RiffHeaderBytes..]);
         return chunk;
     }
 
@@ -99,24 +95,6 @@ internal sealed class WebpEncoder : IFilmEncoder
                 row[x] = now[x] == then[x] ? 0 : now[x] | Opaque;
             }
         }
-    }
-
-    /// <summary>The chunk with the lossless image, padding included, out of a WebP file with one picture.</summary>
-    private static ReadOnlySpan<byte> ImageChunk(ReadOnlySpan<byte> still)
-    {
-        for (var at = 12; at + RiffHeaderBytes <= still.Length;)
-        {
-            var length = BinaryPrimitives.ReadInt32LittleEndian(still[(at + 4)..]);
-            var padded = RiffHeaderBytes + length + (length & 1);
-            if (still.Slice(at, 4).SequenceEqual("VP8L"u8))
-            {
-                return still.Slice(at, padded);
-            }
-
-            at += padded;
-        }
-
-        throw new PictureException("The WebP encoder gave no lossless picture.");
     }
 
     private static void WriteUInt24(Span<byte> target, int value)
