@@ -7,6 +7,9 @@ namespace ScanSim.Cli;
 /// <summary>scansim doctor</summary>
 internal static class DoctorCommand
 {
+    /// <summary>Paths and messages of the system may be longer than a table has room for.</summary>
+    private const int LongestFound = 75;
+
     public static (Command Command, string Example) Create()
     {
         var command = new Command("doctor", "Check what this system lacks for which command. A missing part is no error: the other commands work without it.");
@@ -26,5 +29,7 @@ internal static class DoctorCommand
     }
 
     private static string[] Row(SystemPart part) =>
-        [part.Name, part.NeededBy, part.IsThere ? "there" : "missing", part.Found, part.IsThere ? "" : part.WhatToDo];
+        [part.Name, part.NeededBy, part.IsThere ? "there" : "missing", Shortened(part.Found), part.IsThere ? "" : part.WhatToDo];
+
+    private static string Shortened(string text) => text.Length <= LongestFound ? text : text[..(LongestFound - 1)] + "…";
 }

@@ -51,7 +51,7 @@ internal static class FilmCommand
                 Size = drawn.Size(parsed),
             };
             // Reading a long recording takes a while: what is wrong with the options is said before.
-            plan.Check(recording.Head.DurationS);
+            Film.Check(plan, recording.Head.DurationS, parsed.GetValue(output)!);
             var scene = SceneReader.Load(recording);
             ProgressBar.Around("frames", report => Film.Save(scene, drawn.View(parsed), plan, parsed.GetValue(output)!, report, interruption.Token));
             return ExitCode.Done;

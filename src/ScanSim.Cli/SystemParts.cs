@@ -85,7 +85,7 @@ internal static class SystemParts
 
     public static SystemPart Sdl()
     {
-        var part = new SystemPart("SDL 2 library", "view", false, $"{SdlLibraries[0]} does not load", "Install SDL 2 (apt install libsdl2-2.0-0, dnf install SDL2, brew install sdl2; on Windows put SDL2.dll beside the program).");
+        var part = new SystemPart("SDL 2 library", "view", false, $"{SdlLibraries[0]} does not load", OperatingSystem.IsWindows() ? "Put SDL2.dll beside the program." : "Install it: apt install libsdl2-2.0-0, dnf install SDL2 or brew install sdl2.");
         foreach (var name in SdlLibraries)
         {
             if (NativeLibrary.TryLoad(name, out var library))

@@ -3,7 +3,7 @@ namespace ScanSim.Display.Films;
 /// <summary>The program that makes MP4 of frames; not ours, and not needed for anything else.</summary>
 public static class Ffmpeg
 {
-    public const string HowToInstall = "Install it with the system's package manager (apt install ffmpeg, dnf install ffmpeg, brew install ffmpeg, winget install ffmpeg).";
+    public const string HowToInstall = "Install it: apt, dnf, brew or winget install ffmpeg.";
 
     /// <summary>The first one on the PATH, or null.</summary>
     public static string? Find() => Find(Environment.GetEnvironmentVariable("PATH"));

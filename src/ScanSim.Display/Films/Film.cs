@@ -12,14 +12,9 @@ public static class Film
     /// <param name="cancellation">Ends it without a file.</param>
     public static void Save(Scene scene, ViewOptions view, FilmPlan plan, string path, Action<int, int>? progress = null, CancellationToken cancellation = default)
     {
-        var write = FormatOf(path);
-        plan.Check(scene.DurationS);
+        Check(plan, scene.DurationS, path);
         view.Check();
-        if (Directory.Exists(path))
-        {
-            throw new PictureException($"Film '{path}' could not be written: it is a folder.");
-        }
-
+        var write = FormatOf(path);
         var unfinished = path + ".part";
         var begun = false;
         try
@@ -47,6 +42,27 @@ public static class Film
         }
     }
 
+    /// <summary>Throws <see cref="PictureException"/> for what can be known to go wrong before the recording is read.</summary>
+    public static void Check(FilmPlan plan, double durationS, string path)
+    {
+        var write = FormatOf(path);
+        plan.Check(durationS);
+        if (Directory.Exists(path))
+        {
+            throw new PictureException($"Film '{path}' could not be written: it is a folder.");
+        }
+
+        if (write == Gif)
+        {
+            GifEncoder.Check(plan);
+        }
+        else if (write == Mp4)
+        {
+            Mp4Encoder.Check(plan);
+            FfmpegProgram();
+        }
+    }
+
     private static Action<FilmJob> FormatOf(string path) =>
         Path.GetExtension(path).ToUpperInvariant() switch
         {
@@ -65,7 +81,6 @@ public static class Film
 
     private static void Gif(FilmJob job)
     {
-        GifEncoder.Check(job.Plan);
         var palette = GifPalette.Of(job.Scene, job.View, job.Plan);
         using var file = File.Create(job.Path);
         job.Run(new GifEncoder(file, job.Plan, palette));
@@ -73,12 +88,12 @@ public static class Film
 
     private static void Mp4(FilmJob job)
     {
-        Mp4Encoder.Check(job.Plan);
-        var program = Ffmpeg.Find() ?? throw new PictureException(
-            $"MP4 films need the program ffmpeg, which is not on the PATH. {Ffmpeg.HowToInstall} Or ask for a .webp or .gif, which need nothing.");
-        using var encoder = new Mp4Encoder(program, job.Path, job.Plan, job.Cancellation);
+        using var encoder = new Mp4Encoder(FfmpegProgram(), job.Path, job.Plan, job.Cancellation);
         job.Run(encoder);
     }
+
+    private static string FfmpegProgram() => Ffmpeg.Find() ?? throw new PictureException(
+        $"MP4 films need the program ffmpeg, which is not on the PATH. {Ffmpeg.HowToInstall} Or ask for a .webp or .gif, which need nothing.");
 
     private static void Discard(string path)
     {

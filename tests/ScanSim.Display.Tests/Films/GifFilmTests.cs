@@ -28,9 +28,14 @@ public sealed class GifFilmTests : IDisposable
             var (sum, greatest) = (0L, 0);
             for (var at = 0; at < painted.Length; at++)
             {
+                if (painted[at] == film.Frames[i][at])
+                {
+                    continue;
+                }
+
                 var difference = FilmMaking.Difference(painted[at], film.Frames[i][at]);
                 (sum, greatest) = (sum + difference, Math.Max(greatest, difference));
-                Assert.True(difference == 0 || !exact.Contains(painted[at]), $"{painted[at]} of the theme became {film.Frames[i][at]} in frame {i}");
+                Assert.False(exact.Contains(painted[at]), $"{painted[at]} of the theme became {film.Frames[i][at]} in frame {i}");
             }
 
             // 255 colours for some two thousand shades: under a fifth of the range, and hardly anything on the whole.
