@@ -19,6 +19,8 @@ internal static class CommandTree
         Add(root, examples, BudgetCommand.Create());
         Add(root, examples, PictureCommand.Create());
         Add(root, examples, ExplainCommand.Create());
+        Add(root, examples, FilmCommand.Create(interruption));
+        Add(root, examples, DoctorCommand.Create());
         root.Options.OfType<HelpOption>().Single().Action = new HelpWithExample(examples);
         var parsed = root.Parse(args);
         if (parsed.Errors.Count > 0 && parsed.Action is not HelpWithExample)

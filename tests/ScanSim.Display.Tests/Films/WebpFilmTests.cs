@@ -1,0 +1,57 @@
+using ScanSim.Display.Films;
+
+namespace ScanSim.Display.Tests.Films;
+
+public sealed class WebpFilmTests : IDisposable
+{
+    private readonly TemporaryFolder folder = new();
+
+    public void Dispose() => folder.Dispose();
+
+    [Fact]
+    public void Every_frame_of_a_webp_is_the_painters_pixel_for_pixel()
+    {
+        var plan = FilmMaking.Plan;
+        Film.Save(FilmMaking.Scene, FilmMaking.View, plan, folder.In("a.webp"));
+        var film = DecodedFilm.Read(folder.In("a.webp"));
+        Assert.Equal((800, 600), film.Size);
+        Assert.Equal(19, film.Frames.Count);
+        for (var i = 0; i < film.Frames.Count; i++)
+        {
+            Assert.Equal(FilmMaking.Painted(plan, i), film.Frames[i]);
+        }
+    }
+
+    [Fact]
+    public void A_webp_lasts_as_long_as_its_frames_and_repeats()
+    {
+        var plan = FilmMaking.Plan with { ToS = FilmMaking.Plan.FromS + 4 };
+        Film.Save(FilmMaking.Scene, FilmMaking.View, plan, folder.In("a.webp"));
+        var film = DecodedFilm.Read(folder.In("a.webp"));
+        Assert.Equal([83, 84, 83, 83, 84, 83], film.Durations);
+        Assert.Equal(-1, film.RepetitionCount);
+    }
+
+    [Fact]
+    public void Frames_of_a_view_moved_and_scaled_are_the_painters_too()
+    {
+        var plan = FilmMaking.Plan with { ToS = FilmMaking.Plan.FromS + 2, Size = new PictureSize(1283, 907, 1.5) };
+        var view = new ViewOptions { Theme = Theme.Paper, RangeM = 9_000, CentreEastM = 4_000, Unit = RangeUnit.NauticalMile };
+        Film.Save(FilmMaking.Scene, view, plan, folder.In("a.webp"));
+        var film = DecodedFilm.Read(folder.In("a.webp"));
+        Assert.Equal(FilmMaking.Painted(plan, view, 0), film.Frames[0]);
+        Assert.Equal(FilmMaking.Painted(plan, view, 3), film.Frames[3]);
+    }
+
+    [Fact]
+    public void A_frame_in_which_nothing_changes_is_kept_and_small()
+    {
+        // Away from the beam nothing moves within a third of a millisecond but the figures, and those not there.
+        var plan = FilmMaking.Plan with { FromS = 41.5, ToS = 41.5003, SpeedRatio = 0.01, FramesPerSecond = 60 };
+        Film.Save(FilmMaking.Scene with { Targets = [], Plots = [] }, FilmMaking.View with { RangeM = 10, CentreEastM = 30_000, CentreNorthM = 30_000 }, plan, folder.In("a.webp"));
+        var film = DecodedFilm.Read(folder.In("a.webp"));
+        Assert.Equal(3, film.Frames.Count);
+        Assert.Equal(film.Frames[0], film.Frames[^1]);
+        Assert.True(new FileInfo(folder.In("a.webp")).Length < 60_000);
+    }
+}
