@@ -53,7 +53,7 @@ public sealed class WebpFilmTests : IDisposable
         using (var file = File.Create(folder.In("a." + ending)))
         {
             IFilmEncoder encoder = ending == "gif"
-                ? new GifEncoder(file, FilmMaking.Plan, GifPalette.Of(FilmMaking.Scene, FilmMaking.View, FilmMaking.Plan))
+                ? new GifEncoder(file, FilmMaking.Plan, GifPalette.Of(FilmMaking.Scene, FilmMaking.View, FilmMaking.Plan, CancellationToken.None))
                 : new WebpEncoder(file, FilmMaking.Plan);
             encoder.Write(encoder.Encode(0, frame, null));
             var still = encoder.Encode(1, frame, frame);
