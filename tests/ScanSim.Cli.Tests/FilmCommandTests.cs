@@ -139,8 +139,8 @@ public sealed class FilmCommandTests(HarbourMinute recording) : IClassFixture<Ha
     {
         var help = ScanSimProcess.Run("film", "--help").AssertDone().Output;
         Assert.Matches(@"(?s)Example:\s+scansim film out -o harbour\.webp\s+scansim film .*\.gif\s+scansim film .*\.mp4", help);
-        Assert.Contains("[default: 10]", help, StringComparison.Ordinal);
-        Assert.Contains("[default: 12]", help, StringComparison.Ordinal);
-        Assert.Contains("[default: 1280x800]", help, StringComparison.Ordinal);
+        Assert.Matches(@"--speed <FACTOR> .*film\. \[default: 10\]\n", help);
+        Assert.Matches(@"--fps <N> .*second\. \[default: 12\]\n", help);
+        Assert.Matches(@"--size <WxH> .*\[default: 1280x800\]\.\n", help);
     }
 }
