@@ -21,7 +21,7 @@ internal static class FilmCommand
         var to = QuantityOption.Create("--to", Dimension.Time, "TIME", "Time of the last frame [default: the recording's end].", 0);
         var speed = new Option<double>("--speed")
         {
-            Description = $"Seconds of the scenario in one second of the film [default: {Usual.SpeedRatio}].",
+            Description = "Seconds of the scenario in one second of the film.",
             HelpName = "FACTOR",
             CustomParser = ParseSpeed,
             DefaultValueFactory = _ => Usual.SpeedRatio,
@@ -29,7 +29,7 @@ internal static class FilmCommand
         var output = new Option<string>("--output", "-o") { Description = "Film to write: .webp, .gif or .mp4 (which needs ffmpeg).", HelpName = "FILE", Required = true };
         var fps = new Option<int>("--fps")
         {
-            Description = $"Frames a second [default: {Usual.FramesPerSecond}].",
+            Description = "Frames a second.",
             HelpName = "N",
             CustomParser = ParseFramesPerSecond,
             DefaultValueFactory = _ => Usual.FramesPerSecond,

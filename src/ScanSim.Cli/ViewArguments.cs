@@ -15,17 +15,17 @@ internal sealed class ViewArguments
     private readonly Option<double?> north = QuantityOption.Create("--north", Dimension.Length, "LENGTH", "Middle of the plan, north of the site [default: 0 m].");
     private readonly Option<bool> paper = new("--paper") { Description = "Dark on white, for printing." };
     private readonly Option<int> afterglow = new("--afterglow") { Description = "Scans for which plots stay, fading.", HelpName = "SCANS", DefaultValueFactory = _ => new ViewOptions().AfterglowScans };
-    private readonly Option<PictureSize> size;
+    // No default of the option's own: the help would print all of the record's members.
+    private readonly Option<PictureSize?> size;
+    private readonly PictureSize defaultSize;
     private readonly Option<double> scale = new("--scale") { Description = "Draws everything so many times as large.", HelpName = "FACTOR", DefaultValueFactory = _ => 1 };
     private readonly Option<bool> noTruth = new("--no-truth") { Description = "Leave out where the targets really are." };
 
-    private ViewArguments(PictureSize defaultSize) => size = new Option<PictureSize>("--size")
+    private ViewArguments(PictureSize defaultSize)
     {
-        Description = $"Pixels [default: {defaultSize.WidthPx}x{defaultSize.HeightPx}].",
-        HelpName = "WxH",
-        CustomParser = ParseSize,
-        DefaultValueFactory = _ => defaultSize,
-    };
+        this.defaultSize = defaultSize;
+        size = new Option<PictureSize?>("--size") { Description = $"Pixels [default: {defaultSize.WidthPx}x{defaultSize.HeightPx}].", HelpName = "WxH", CustomParser = ParseSize };
+    }
 
     public static ViewArguments AddTo(Command command, PictureSize defaultSize)
     {
@@ -49,9 +49,9 @@ internal sealed class ViewArguments
         ShowTruth = !parsed.GetValue(noTruth),
     };
 
-    public PictureSize Size(ParseResult parsed) => parsed.GetValue(size) with { Scale = parsed.GetValue(scale) };
+    public PictureSize Size(ParseResult parsed) => (parsed.GetValue(size) ?? defaultSize) with { Scale = parsed.GetValue(scale) };
 
-    private static PictureSize ParseSize(ArgumentResult result)
+    private static PictureSize? ParseSize(ArgumentResult result)
     {
         var text = result.Tokens.Count > 0 ? result.Tokens[0].Value : "";
         var parts = text.Split('x');
@@ -63,6 +63,6 @@ internal sealed class ViewArguments
         }
 
         result.AddError($"--size: read \"{text}\", expected width and height in pixels, such as 1920x1080");
-        return PictureSize.Default;
+        return null;
     }
 }

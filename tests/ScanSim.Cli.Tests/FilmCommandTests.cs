@@ -5,11 +5,9 @@ using SkiaSharp;
 
 namespace ScanSim.Cli.Tests;
 
-public sealed class FilmCommandTests : IDisposable
+public sealed class FilmCommandTests(HarbourMinute recording) : IClassFixture<HarbourMinute>, IDisposable
 {
     private readonly TemporaryFolder folder = new();
-
-    public FilmCommandTests() => ScanSimProcess.Run("run", ScanSimProcess.Harbour, "-o", folder.Of("out"), "--duration", "1 min").AssertDone();
 
     public void Dispose() => folder.Dispose();
 
@@ -20,7 +18,7 @@ public sealed class FilmCommandTests : IDisposable
     {
         foreach (var name in (string[])["a", "b"])
         {
-            var outcome = ScanSimProcess.Run("film", folder.Of("out"), "--from", "10 s", "--to", "40 s", "--fps", "5", "--size", "800x600", "-o", folder.Of(name + "." + ending)).AssertDone();
+            var outcome = ScanSimProcess.Run("film", recording.Path, "--from", "10 s", "--to", "40 s", "--fps", "5", "--size", "800x600", "-o", folder.Of(name + "." + ending)).AssertDone();
             Assert.Equal("", outcome.Output + outcome.Error);
         }
 
@@ -28,15 +26,15 @@ public sealed class FilmCommandTests : IDisposable
         Assert.Equal((800, 600, 16), (codec.Info.Width, codec.Info.Height, codec.FrameCount));
         Assert.Equal(3200, codec.FrameInfo.Sum(f => f.Duration));
         Assert.Equal(File.ReadAllBytes(folder.Of("a." + ending)), File.ReadAllBytes(folder.Of("b." + ending)));
-        Assert.Equal(3, Directory.GetFileSystemEntries(folder.Path).Length);
+        Assert.Equal(2, Directory.GetFileSystemEntries(folder.Path).Length);
     }
 
     [Fact]
     public void A_film_shows_what_a_picture_of_the_same_time_and_view_shows()
     {
         string[] view = ["--paper", "--unit", "nmi", "--range", "6 km", "--east", "1 km", "--afterglow", "3", "--no-truth", "--size", "900x700"];
-        ScanSimProcess.Run(["film", folder.Of("out"), "--from", "30 s", "--to", "31 s", "--speed", "1", "--fps", "1", "-o", folder.Of("a.webp"), .. view]).AssertDone();
-        ScanSimProcess.Run(["picture", folder.Of("out"), "--at", "30 s", "-o", folder.Of("a.png"), .. view]).AssertDone();
+        ScanSimProcess.Run(["film", recording.Path, "--from", "30 s", "--to", "31 s", "--speed", "1", "--fps", "1", "-o", folder.Of("a.webp"), .. view]).AssertDone();
+        ScanSimProcess.Run(["picture", recording.Path, "--at", "30 s", "-o", folder.Of("a.png"), .. view]).AssertDone();
         using var picture = SKBitmap.Decode(folder.Of("a.png"));
         using var firstFrame = SKBitmap.Decode(folder.Of("a.webp"));
         Assert.Equal(picture.Pixels, firstFrame.Pixels);
@@ -45,7 +43,7 @@ public sealed class FilmCommandTests : IDisposable
     [Fact]
     public void Without_times_the_whole_recording_is_filmed()
     {
-        ScanSimProcess.Run("film", folder.Of("out"), "--speed", "20", "--fps", "1", "-o", folder.Of("a.gif")).AssertDone();
+        ScanSimProcess.Run("film", recording.Path, "--speed", "20", "--fps", "1", "-o", folder.Of("a.gif")).AssertDone();
         using var codec = SKCodec.Create(folder.Of("a.gif"));
         Assert.Equal((1280, 800, 4), (codec.Info.Width, codec.Info.Height, codec.FrameCount));
     }
@@ -53,11 +51,11 @@ public sealed class FilmCommandTests : IDisposable
     [Fact]
     public void An_mp4_is_made_where_ffmpeg_is_and_asked_for_where_it_is_not()
     {
-        var outcome = ScanSimWithPath.Run("", "film", folder.Of("out"), "-o", folder.Of("a.mp4"));
+        var outcome = ScanSimWithPath.Run("", "film", recording.Path, "-o", folder.Of("a.mp4"));
         outcome.AssertRefused("ffmpeg", "PATH", "install ffmpeg", ".webp");
-        Assert.Single(Directory.GetFileSystemEntries(folder.Path));
+        Assert.Empty(Directory.GetFileSystemEntries(folder.Path));
         Assert.SkipWhen(Ffmpeg.Find() is null, "ffmpeg is not installed");
-        ScanSimProcess.Run("film", folder.Of("out"), "--to", "5 s", "-o", folder.Of("a.mp4")).AssertDone();
+        ScanSimProcess.Run("film", recording.Path, "--to", "5 s", "-o", folder.Of("a.mp4")).AssertDone();
         Assert.True(new FileInfo(folder.Of("a.mp4")).Length > 10_000);
     }
 
@@ -71,8 +69,8 @@ public sealed class FilmCommandTests : IDisposable
             File.SetUnixFileMode(folder.Of("ffmpeg"), UnixFileMode.UserRead | UnixFileMode.UserExecute);
         }
 
-        ScanSimWithPath.Run(folder.Path, "film", folder.Of("out"), "-o", folder.Of("a.mp4")).AssertRefused("exit code 8", "scansim: Unknown encoder 'libx264'");
-        Assert.Equal(["ffmpeg", "out"], Directory.GetFileSystemEntries(folder.Path).Select(Path.GetFileName).Order(StringComparer.Ordinal));
+        ScanSimWithPath.Run(folder.Path, "film", recording.Path, "-o", folder.Of("a.mp4")).AssertRefused("exit code 8", "scansim: Unknown encoder 'libx264'");
+        Assert.Equal(["ffmpeg"], Directory.GetFileSystemEntries(folder.Path).Select(Path.GetFileName));
     }
 
     [Theory]
@@ -83,7 +81,7 @@ public sealed class FilmCommandTests : IDisposable
     {
         Assert.SkipUnless(OperatingSystem.IsLinux() || OperatingSystem.IsMacOS(), "signals are sent with kill(1)");
         Assert.SkipWhen(ending == "mp4" && Ffmpeg.Find() is null, "ffmpeg is not installed");
-        using var process = ScanSimProcess.Start("film", folder.Of("out"), "--speed", "0.1", "-o", folder.Of("a." + ending));
+        using var process = ScanSimProcess.Start("film", recording.Path, "--speed", "0.1", "-o", folder.Of("a." + ending));
         var error = process.StandardError.ReadToEndAsync(TestContext.Current.CancellationToken);
         while (!File.Exists(folder.Of($"a.{ending}.part")))
         {
@@ -100,7 +98,7 @@ public sealed class FilmCommandTests : IDisposable
         await process.WaitForExitAsync(TestContext.Current.CancellationToken);
         Assert.Equal("scansim: interrupted", (await error).Trim());
         Assert.Equal(exitCode, process.ExitCode);
-        Assert.Equal(["out"], Directory.GetFileSystemEntries(folder.Path).Select(Path.GetFileName));
+        Assert.Empty(Directory.GetFileSystemEntries(folder.Path));
     }
 
     [Theory]
@@ -121,19 +119,19 @@ public sealed class FilmCommandTests : IDisposable
     [InlineData("--afterglow", "0", "Afterglow")]
     public void A_wrong_option_is_refused_with_what_would_be_right(string option, string value, string word)
     {
-        ScanSimProcess.Run("film", folder.Of("out"), "-o", folder.Of("a.webp"), option, value).AssertRefused(word);
-        Assert.Single(Directory.GetFileSystemEntries(folder.Path));
+        ScanSimProcess.Run("film", recording.Path, "-o", folder.Of("a.webp"), option, value).AssertRefused(word);
+        Assert.Empty(Directory.GetFileSystemEntries(folder.Path));
     }
 
     [Fact]
     public void A_film_of_no_recording_or_to_a_place_that_does_not_go_is_refused()
     {
         ScanSimProcess.Run("film", folder.Of("nowhere"), "-o", folder.Of("a.webp")).AssertRefused("nowhere");
-        ScanSimProcess.Run("film", folder.Of("out"), "-o", folder.Of("a.avi")).AssertRefused("a.avi", ".webp, .gif or .mp4");
-        ScanSimProcess.Run("film", folder.Of("out"), "-o", folder.Of("no/such/a.webp")).AssertRefused("a.webp");
-        ScanSimProcess.Run("film", folder.Of("out"), "--size", "801x600", "-o", folder.Of("a.mp4")).AssertRefused("even");
-        ScanSimProcess.Run("film", folder.Of("out"), "--fps", "60", "-o", folder.Of("a.gif")).AssertRefused("at most 50");
-        Assert.Single(Directory.GetFileSystemEntries(folder.Path));
+        ScanSimProcess.Run("film", recording.Path, "-o", folder.Of("a.avi")).AssertRefused("a.avi", ".webp, .gif or .mp4");
+        ScanSimProcess.Run("film", recording.Path, "-o", folder.Of("no/such/a.webp")).AssertRefused("a.webp");
+        ScanSimProcess.Run("film", recording.Path, "--size", "801x600", "-o", folder.Of("a.mp4")).AssertRefused("even");
+        ScanSimProcess.Run("film", recording.Path, "--fps", "60", "-o", folder.Of("a.gif")).AssertRefused("at most 50");
+        Assert.Empty(Directory.GetFileSystemEntries(folder.Path));
     }
 
     [Fact]
@@ -141,8 +139,8 @@ public sealed class FilmCommandTests : IDisposable
     {
         var help = ScanSimProcess.Run("film", "--help").AssertDone().Output;
         Assert.Matches(@"(?s)Example:\s+scansim film out -o harbour\.webp\s+scansim film .*\.gif\s+scansim film .*\.mp4", help);
-        Assert.Contains("[default: 10]", help, StringComparison.Ordinal);
-        Assert.Contains("[default: 12]", help, StringComparison.Ordinal);
-        Assert.Contains("[default: 1280x800]", help, StringComparison.Ordinal);
+        Assert.Matches(@"--speed <FACTOR> .*film\. \[default: 10\]\n", help);
+        Assert.Matches(@"--fps <N> .*second\. \[default: 12\]\n", help);
+        Assert.Matches(@"--size <WxH> .*\[default: 1280x800\]\.\n", help);
     }
 }

@@ -81,7 +81,7 @@ public static class Film
 
     private static void Gif(FilmJob job)
     {
-        var palette = GifPalette.Of(job.Scene, job.View, job.Plan);
+        var palette = GifPalette.Of(job.Scene, job.View, job.Plan, job.Cancellation);
         using var file = File.Create(job.Path);
         job.Run(new GifEncoder(file, job.Plan, palette));
     }

@@ -42,7 +42,7 @@ internal sealed class GifPalette
         }
     }
 
-    public static GifPalette Of(Scene scene, ViewOptions view, FilmPlan plan)
+    public static GifPalette Of(Scene scene, ViewOptions view, FilmPlan plan, CancellationToken cancellation)
     {
         var histogram = new Dictionary<uint, long>();
         using var frame = new FrameBuffer(plan.Size);
@@ -50,6 +50,7 @@ internal sealed class GifPalette
         var painter = new Painter(scene);
         for (var sample = 0; sample < samples; sample++)
         {
+            cancellation.ThrowIfCancellationRequested();
             frame.Paint(painter, view, plan.TimeS((int)((long)sample * (plan.FrameCount - 1) / Math.Max(1, samples - 1))));
             Count(frame, histogram);
         }
