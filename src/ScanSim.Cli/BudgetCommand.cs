@@ -21,7 +21,7 @@ internal static class BudgetCommand
             ("none", Wanted.None), ("range", Wanted.Range), ("power", Wanted.Power), ("rcs", Wanted.Rcs), ("gain", Wanted.Gain), ("snr", Wanted.Snr));
         var pd = new Option<double>("--pd")
         {
-            Description = $"Detection probability to solve for [default: {UsualDetectionProbability.ToString(CultureInfo.InvariantCulture)}].",
+            Description = "Detection probability to solve for.",
             HelpName = "P",
             CustomParser = ParseProbability,
             DefaultValueFactory = _ => UsualDetectionProbability,
@@ -46,7 +46,7 @@ internal static class BudgetCommand
             BudgetReport.Write(Console.Out, scenario, budget, parsed.GetValue(solve), parsed.GetValue(pd));
             return ExitCode.Done;
         });
-        return (command, "scansim budget scenarios/harbour.json --target ferry\nscansim budget scenarios/harbour.json --target jetski --range \"6 km\" --solve range --pd 0.8");
+        return (command, "scansim budget scenarios/harbour.json --target ferry\nscansim budget scenarios/harbour.json --target jet-ski --range \"6 km\" --solve range --pd 0.8");
     }
 
     private static Target TargetOf(Scenario scenario, string id) =>

@@ -15,6 +15,9 @@ public sealed class CommandLineTests : IDisposable
     [InlineData("schema")]
     [InlineData("budget")]
     [InlineData("picture")]
+    [InlineData("explain")]
+    [InlineData("film")]
+    [InlineData("doctor")]
     public void Help_of_each_command_ends_with_an_example_of_it(string command)
     {
         var outcome = ScanSimProcess.Run(command, "--help").AssertDone();
