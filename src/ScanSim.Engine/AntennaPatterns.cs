@@ -9,8 +9,8 @@ internal sealed class AntennaPatterns
     public AntennaPatterns(Antenna antenna)
     {
         FloorRatio = antenna.SideLobeFloorRatio;
-        Azimuth = new SampledPattern(PatternOf(antenna.Azimuth, antenna.TiltRad), FloorRatio);
-        Elevation = new SampledPattern(PatternOf(antenna.Elevation, antenna.TiltRad), FloorRatio);
+        Azimuth = new SampledPattern(antenna.Azimuth.ToPattern(antenna.TiltRad), FloorRatio);
+        Elevation = new SampledPattern(antenna.Elevation.ToPattern(antenna.TiltRad), FloorRatio);
         TiltRad = antenna.TiltRad;
     }
 
@@ -21,15 +21,4 @@ internal sealed class AntennaPatterns
     public double TiltRad { get; }
 
     public double FloorRatio { get; }
-
-    private static Pattern PatternOf(PatternCut cut, double tiltRad) => cut switch
-    {
-        PatternCut.Gaussian => new GaussianPattern(cut.BeamwidthRad),
-        PatternCut.Uniform => new AperturePattern(ApertureTaper.Uniform, cut.BeamwidthRad),
-        PatternCut.Cosine => new AperturePattern(ApertureTaper.Cosine, cut.BeamwidthRad),
-        PatternCut.CosineSquared => new AperturePattern(ApertureTaper.CosineSquared, cut.BeamwidthRad),
-        PatternCut.CosecantSquared shaped => new CosecantSquaredPattern(shaped.BeamwidthRad, tiltRad, shaped.UpToRad),
-        PatternCut.Table table => new TablePattern(table.OffsetsRad.AsSpan(), table.LevelsDb.AsSpan()),
-        _ => throw new InvalidOperationException("unknown kind of pattern"),
-    };
 }

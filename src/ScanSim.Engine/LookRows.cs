@@ -1,5 +1,6 @@
 using System.Collections.Immutable;
 using ScanSim.Physics;
+using ScanSim.Physics.Antennas;
 using ScanSim.Physics.Detection;
 using ScanSim.Recordings;
 using ScanSim.Scenarios;
@@ -13,7 +14,11 @@ internal sealed class LookRows(RunSetup setup)
 
     private readonly int[] best = new int[setup.Targets.Length];
     private readonly double[] pulseSnr = new double[setup.Timeline.Grid.Pulses.Max()];
-    private readonly ImmutableArray<double> centredBeamRatio = [.. Enumerable.Range(0, setup.Detectors.Length).Select(prf => CentredBeamRatio(setup, prf))];
+    private readonly ImmutableArray<double> centredBeamRatio = 
+    [
+        .. setup.Timeline.Grid.Pulses.Zip(setup.Timeline.Grid.PriPs, (pulses, priPs) => CentredDwell.MeanTwoWayRatio(
+            setup.Model.Patterns.Azimuth, setup.Timeline.BeamSpeedRadPerS * priPs / DwellGrid.PicosecondsPerSecond, pulses)),
+    ];
     private readonly double radarDb = Decibels.FromRatio(setup.Model.RadarRatioM2);
 
     public void Add(FoundLook[] looks, ReadOnlySpan<int> order, Dwell[] dwells, List<LookRow> rows)
@@ -103,21 +108,6 @@ internal sealed class LookRows(RunSetup setup)
         }
 
         return detector.Probability(target.Fluctuation, found.Look.SnrRatio, pulses);
-    }
-
-    /// <summary>Mean two-way azimuth pattern of a dwell whose middle points at a target on the horizon: the loss that no dwell escapes.</summary>
-    private static double CentredBeamRatio(RunSetup setup, int prf)
-    {
-        var pulses = setup.Timeline.Grid.Pulses[prf];
-        var stepRad = setup.Timeline.BeamSpeedRadPerS * setup.Timeline.Grid.PriPs[prf] / DwellGrid.PicosecondsPerSecond;
-        double sum = 0;
-        for (var pulse = 0; pulse < pulses; pulse++)
-        {
-            var gain = setup.Model.Patterns.Azimuth.GainRatio(Math.Clamp(stepRad * (pulse - 0.5 * (pulses - 1)), -Math.PI, Math.PI));
-            sum += gain * gain;
-        }
-
-        return sum / pulses;
     }
 
     private static LossReason ReasonOf(RunTarget target, Detector detector, in FoundLook found, double centredRatio)

@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using ScanSim.Physics.Antennas;
 
 namespace ScanSim.Scenarios;
 
@@ -11,6 +12,19 @@ public abstract record PatternCut
 
     /// <summary>Width between the one-way half-power points.</summary>
     public required double BeamwidthRad { get; init; }
+
+    /// <summary>The formula of the cut.</summary>
+    /// <param name="tiltRad">Elevation of the beam's peak; only the cosecant-squared shape depends on it.</param>
+    public Pattern ToPattern(double tiltRad) => this switch
+    {
+        Gaussian => new GaussianPattern(BeamwidthRad),
+        Uniform => new AperturePattern(ApertureTaper.Uniform, BeamwidthRad),
+        Cosine => new AperturePattern(ApertureTaper.Cosine, BeamwidthRad),
+        CosineSquared => new AperturePattern(ApertureTaper.CosineSquared, BeamwidthRad),
+        CosecantSquared shaped => new CosecantSquaredPattern(BeamwidthRad, tiltRad, shaped.UpToRad),
+        Table table => new TablePattern(table.OffsetsRad.AsSpan(), table.LevelsDb.AsSpan()),
+        _ => throw new InvalidOperationException("unknown kind of pattern"),
+    };
 
     public sealed record Gaussian : PatternCut;
 
