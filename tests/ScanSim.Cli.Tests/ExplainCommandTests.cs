@@ -89,6 +89,15 @@ public sealed class ExplainCommandTests : IDisposable
         Assert.True(Looks(story).Count < 10);
     }
 
+    [Fact]
+    public void An_aircraft_overhead_is_lost_to_the_beams_elevation()
+    {
+        ScanSimProcess.Run("run", ScanSimProcess.Airfield, "-o", folder.Of("out"), "--duration", "250 s").AssertDone();
+        var looks = Looks(ScanSimProcess.Run("explain", folder.Of("out"), "--target", "overflight", "--from", "206 s").AssertDone().Output);
+        Assert.True(looks.Count >= 9, $"{looks.Count} looks");
+        Assert.All(looks, l => Assert.Matches(@"60\.0 dB off the beam's elevation, [\d.]+ dB in hand by range$", l.Reason));
+    }
+
     [Theory]
     [InlineData("\"bearing\": \"20 deg\", \"range\": \"9.5 km\"", "\"bearing\": \"230 deg\", \"range\": \"9.5 km\"", "trawler", @"24 scans, the first: in the blanked sector 200° to 260° \(bearing 230\.\d°\)")]
     [InlineData("\"bearing\": \"20 deg\", \"range\": \"9.5 km\"", "\"bearing\": \"20 deg\", \"range\": \"60 km\"", "trawler", @"24 scans, the first: below the horizon by 26\.\d\d km: 60\.\d\d km away over ground, in sight to 33\.\d\d km \(antenna 42 m, target 3 m above sea level\)")]

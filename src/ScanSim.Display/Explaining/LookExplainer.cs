@@ -20,6 +20,7 @@ public sealed class LookExplainer
     private readonly double wantedPd;
     private readonly RangeUnit unit;
     private readonly Dictionary<string, Target> targets;
+    private readonly ElevationCut elevationCut;
     private readonly Dictionary<(FluctuationCase Case, int Pulses), (double EvenDb, double WantedDb)> needs = [];
 
     /// <summary>Begins to reason about one scenario.</summary>
@@ -31,6 +32,7 @@ public sealed class LookExplainer
         this.scenario = scenario;
         this.wantedPd = wantedPd;
         this.unit = unit;
+        elevationCut = new ElevationCut(scenario.Radar.Antenna);
         targets = scenario.Targets.ToDictionary(t => t.Id, StringComparer.Ordinal);
     }
 
@@ -39,11 +41,13 @@ public sealed class LookExplainer
         var mates = cellMates.IsDefault ? [] : cellMates;
         var (evenDb, forWantedDb) = Needs(row);
         var freeSpaceDb = row.RadarDb + row.RcsDb + row.SpreadingDb;
+        var beamDb = row.AzimuthBeamDb + row.ElevationBeamDb;
+        var byElevation = elevationCut.HoldsAtFloor(row.ElevationDeg, beamDb);
         ImmutableArray<TermLoss> losses =
         [
             new(LookTerm.Range, evenDb - freeSpaceDb),
-            new(LookTerm.AzimuthBeam, -row.AzimuthBeamDb),
-            new(LookTerm.ElevationBeam, -row.ElevationBeamDb),
+            new(LookTerm.AzimuthBeam, byElevation ? 0 : -row.AzimuthBeamDb),
+            new(LookTerm.ElevationBeam, byElevation ? -beamDb : -row.ElevationBeamDb),
             new(LookTerm.Eclipsing, -row.EclipsingDb),
         ];
         return new LookExplanation
@@ -57,7 +61,7 @@ public sealed class LookExplainer
             EvenOddsRangeM = RangeAtM(row, evenDb),
             WantedRangeM = RangeAtM(row, forWantedDb),
             Losses = losses,
-            Outcome = OutcomeOf(row),
+            Outcome = byElevation && row.LostTo == LossReason.AzimuthBeam ? PassOutcome.ElevationBeam : OutcomeOf(row),
             Reason = LookWords.Of(row, row.SnrDb - evenDb, losses, mates),
         };
     }

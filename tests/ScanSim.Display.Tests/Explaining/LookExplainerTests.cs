@@ -143,6 +143,24 @@ public sealed class LookExplainerTests
     }
 
     [Fact]
+    public void On_the_side_lobe_floor_the_elevation_bears_the_loss_when_it_alone_would_hold_the_look_there()
+    {
+        // Floor 1e-4 both ways: -80 dB. A Gaussian beam of 20° is at its floor from 20°·√(40 / 12.04) = 36.5° on.
+        var explainer = new LookExplainer(Scenario);
+        var row = Row(60, -80, 0, 0, LossReason.AzimuthBeam);
+        var overhead = explainer.Explain(row with { ElevationDeg = 40 });
+        Assert.Equal((0, 80), (overhead.LossDb(LookTerm.AzimuthBeam), overhead.LossDb(LookTerm.ElevationBeam)));
+        Assert.Equal(PassOutcome.ElevationBeam, overhead.Outcome);
+        Assert.Equal("missed: 22.8 dB below need: 80.0 dB off the beam's elevation, 57.2 dB in hand by range", overhead.Reason);
+        foreach (var elsewhere in new[] { row with { ElevationDeg = 33 }, row with { ElevationDeg = 40, AzimuthBeamDb = -79, SnrDb = row.SnrDb + 1 } })
+        {
+            var look = explainer.Explain(elsewhere);
+            Assert.Equal(-elsewhere.AzimuthBeamDb, look.LossDb(LookTerm.AzimuthBeam));
+            Assert.Equal(PassOutcome.AzimuthBeam, look.Outcome);
+        }
+    }
+
+    [Fact]
     public void A_target_that_the_scenario_does_not_have_is_an_error()
     {
         var fault = Assert.Throws<PictureException>(() => new LookExplainer(Scenario).Explain(Row(0, 0, 0, 0, LossReason.None) with { Target = "ghost" }));

@@ -98,6 +98,20 @@ public sealed class TargetStoryTests : IDisposable
     }
 
     [Fact]
+    public void An_echo_that_went_into_a_neighbours_plot_is_said_so()
+    {
+        // Widest plot 5°: 0.0347 s; half of it on either side of the pass.
+        Pass(0, TargetView.InView, plot: false, Detected(0));
+        Pass(1, TargetView.InView, plot: false, Detected(1));
+        plots.Add(SceneMaking.PlotRow($"{scenario.Targets[1].Id}+{scenario.Targets[0].Id}", 0, PassTimeS(0) + 0.025, 10_000, 93.6));
+        plots.Add(SceneMaking.PlotRow($"{scenario.Targets[1].Id}+{scenario.Targets[0].Id}", 1, PassTimeS(1) + 0.04, 10_000, 95.8));
+        var passes = Read().Passes;
+        Assert.EndsWith($", but its echo went into a plot with {scenario.Targets[1].Id}, away from where it was", passes[0].Reason, StringComparison.Ordinal);
+        Assert.EndsWith(", no plot where it was", passes[1].Reason, StringComparison.Ordinal);
+        Assert.All(passes, p => Assert.Equal(PassOutcome.HitWithoutPlot, p.Outcome));
+    }
+
+    [Fact]
     public void Targets_of_one_cell_name_each_other()
     {
         var other = scenario.Targets[1].Id;
