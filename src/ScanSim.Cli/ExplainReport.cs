@@ -54,7 +54,7 @@ internal static class ExplainReport
         foreach (var look in looks)
         {
             output.WriteLine(Line(
-                $"{look.Row.Pulses} pulses, Pfa {scenario.Radar.Processing.FalseAlarmProbability:0.##E+0}: needs {look.NeededDb:0.00} dB per pulse for Pd 0.5, {look.NeededForWantedDb:0.00} dB for Pd {look.WantedPd:0.####}; in free space at the beam's peak out to {RangeWords.Of(look.EvenOddsRangeM, unit)} and {RangeWords.Of(look.WantedRangeM, unit)}"));
+                $"{look.Row.Pulses} pulses, Pfa {scenario.Radar.Processing.FalseAlarmProbability:0.##E+0}: needs {look.NeededDb:0.00} dB per pulse for Pd 0.5, {look.NeededForWantedDb:0.00} dB for Pd {look.WantedPd:0.####}; in free space, with the dwell centred on it, out to {RangeWords.Of(look.EvenOddsRangeM, unit)} and {RangeWords.Of(look.WantedRangeM, unit)}"));
         }
 
         var inView = story.Passes.Count(p => p.InView);
@@ -94,7 +94,7 @@ internal static class ExplainReport
             output.WriteLine(Line($"What set missed looks apart from seen ones most: {Words(telling)}, {DifferenceDb(story, telling):0.0} dB in the mean."));
         }
 
-        output.WriteLine("Losses are against free space at the beam's peak; range counts from where Pd is 0.5, and below 0 it is in hand.");
+        output.WriteLine("Losses are against free space with the dwell centred on the target; range counts from where Pd is 0.5, and below 0 it is in hand.");
     }
 
     private static double DifferenceDb(TargetStory story, LookTerm term) => story.MeanLossDb(term, missed: true) - story.MeanLossDb(term, missed: false);

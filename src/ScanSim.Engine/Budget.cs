@@ -71,7 +71,7 @@ public sealed record Budget
     {
         var radar = scenario.Radar;
         var beams = look.AzimuthBeamRatio * look.ElevationBeamRatio * look.EclipsingRatio;
-        var terms = LookModel.RadarTerms(scenario) with { RcsM2 = target.RcsM2, RangeM = look.RangeM, LossRatio = radar.Losses.TotalRatio / beams };
+        var terms = radar.EquationTerms() with { RcsM2 = target.RcsM2, RangeM = look.RangeM, LossRatio = radar.Losses.TotalRatio / beams };
         var received = BudgetLines.Received(terms, radar.Losses, look);
         var toSnr = BudgetLines.ToSnr(terms);
         var receivedDbW = received.Sum(t => t.Db);

@@ -1,5 +1,4 @@
 using System.Collections.Immutable;
-using ScanSim.Physics.Waveforms;
 using ScanSim.Scenarios;
 
 namespace ScanSim.Engine;
@@ -12,10 +11,10 @@ internal sealed class DwellGrid
 
     private readonly long[] offsetPs;
 
-    public DwellGrid(Radar radar, double scanRateRadPerS)
+    public DwellGrid(Radar radar)
     {
         PriPs = [.. radar.Waveform.PrfHz.Select(prfHz => ToPicoseconds(1 / prfHz))];
-        Pulses = [.. radar.Waveform.PrfHz.Select(prfHz => PulseCount(radar, prfHz, scanRateRadPerS))];
+        Pulses = [.. radar.Waveform.PrfHz.Select(prfHz => radar.PulsesPerDwell(prfHz))];
         offsetPs = new long[PriPs.Length + 1];
         for (var i = 0; i < PriPs.Length; i++)
         {
@@ -54,8 +53,4 @@ internal sealed class DwellGrid
 
         return index;
     }
-
-    private static int PulseCount(Radar radar, double prfHz, double scanRateRadPerS) =>
-        radar.Processing.PulsesPerDwell
-        ?? Math.Max(1, (int)Math.Round(BeamwidthPulses.Count(radar.Antenna.Azimuth.BeamwidthRad, prfHz, scanRateRadPerS)));
 }

@@ -1,4 +1,3 @@
-using ScanSim.Physics;
 using ScanSim.Physics.Earth;
 using ScanSim.Physics.Waveforms;
 using ScanSim.Recordings;
@@ -34,32 +33,13 @@ public sealed class LookModel
         horizonM = earth.HorizonDistanceM(Math.Max(0, antennaAltitudeM));
         pulseWidthS = radar.Waveform.PulseWidthS;
         instrumentedRangeM = radar.InstrumentedRangeM;
-        RadarRatioM2 = RadarTerms(scenario).SnrRatio();
+        RadarRatioM2 = radar.EquationTerms().SnrRatio();
     }
 
     /// <summary>SNR per pulse of 1 m² at 1 m at the peak of the beam: everything that no target changes. Unit: m⁴/m².</summary>
     public double RadarRatioM2 { get; }
 
     internal AntennaPatterns Patterns => patterns;
-
-    /// <summary>The scenario's radar equation with a target of 1 m² at 1 m.</summary>
-    public static RadarEquationTerms RadarTerms(Scenario scenario)
-    {
-        var radar = scenario.Radar;
-        return new RadarEquationTerms
-        {
-            PeakPowerW = radar.PeakPowerW,
-            TransmitGainRatio = radar.Antenna.GainRatio,
-            ReceiveGainRatio = radar.Antenna.GainRatio,
-            WavelengthM = Constants.SpeedOfLightMps / radar.CarrierHz,
-            RcsM2 = 1,
-            RangeM = 1,
-            LossRatio = radar.Losses.TotalRatio,
-            NoiseTemperatureK = radar.Receiver.SystemTemperatureK,
-            NoiseBandwidthHz = 1 / radar.Waveform.CompressedWidthS,
-            EnergyGainRatio = radar.Waveform.PulseWidthS / radar.Waveform.CompressedWidthS,
-        };
-    }
 
     /// <summary>Where a target stands as seen from the antenna, on the effective earth.</summary>
     public Sight SightOf(in TrackState state)

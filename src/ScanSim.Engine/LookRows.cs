@@ -56,8 +56,18 @@ internal sealed class LookRows(RunSetup setup)
         }
     }
 
-    private static bool IsBetter(in FoundLook a, in FoundLook b) =>
-        a.Detected != b.Detected ? a.Detected : a.Look.SnrRatio > b.Look.SnrRatio;
+    /// <summary>Detected first, then by SNR; on the side-lobe floor, where all dwells are alike, the one that points nearest.</summary>
+    private static bool IsBetter(in FoundLook a, in FoundLook b)
+    {
+        if (a.Detected != b.Detected)
+        {
+            return a.Detected;
+        }
+
+        return a.Look.SnrRatio != b.Look.SnrRatio
+            ? a.Look.SnrRatio > b.Look.SnrRatio
+            : Math.Abs(a.Look.OffsetRad) < Math.Abs(b.Look.OffsetRad);
+    }
 
     private LookRow RowOf(in FoundLook found, in Dwell dwell)
     {

@@ -8,7 +8,7 @@ internal sealed class RotationTimeline : ScanTimeline
     public RotationTimeline(Scenario scenario, Scan.Rotation rotation)
         : base(
             scenario,
-            new DwellGrid(scenario.Radar, Angles.TurnRad / rotation.PeriodS),
+            new DwellGrid(scenario.Radar),
             fromRad: 0,
             Angles.TurnRad,
             DwellGrid.ToPicoseconds(rotation.PeriodS),

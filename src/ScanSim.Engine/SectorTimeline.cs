@@ -10,7 +10,7 @@ internal sealed class SectorTimeline : ScanTimeline
     public SectorTimeline(Scenario scenario, Scan.Sector sector)
         : base(
             scenario,
-            new DwellGrid(scenario.Radar, sector.RateRadPerS),
+            new DwellGrid(scenario.Radar),
             sector.Limits.FromRad,
             sector.Limits.WidthRad,
             DwellGrid.ToPicoseconds(sector.Limits.WidthRad / sector.RateRadPerS),

@@ -1,4 +1,6 @@
 using System.Collections.Immutable;
+using ScanSim.Physics;
+using ScanSim.Physics.Waveforms;
 
 namespace ScanSim.Scenarios;
 
@@ -30,4 +32,23 @@ public sealed record Radar
     public required PlotRules Plots { get; init; }
 
     public required InstrumentErrors Accuracy { get; init; }
+
+    /// <summary>The radar equation with a target of 1 m² at 1 m, at the peak of the beam: all that no target changes.</summary>
+    public RadarEquationTerms EquationTerms() => new()
+    {
+        PeakPowerW = PeakPowerW,
+        TransmitGainRatio = Antenna.GainRatio,
+        ReceiveGainRatio = Antenna.GainRatio,
+        WavelengthM = Constants.SpeedOfLightMps / CarrierHz,
+        RcsM2 = 1,
+        RangeM = 1,
+        LossRatio = Losses.TotalRatio,
+        NoiseTemperatureK = Receiver.SystemTemperatureK,
+        NoiseBandwidthHz = 1 / Waveform.CompressedWidthS,
+        EnergyGainRatio = Waveform.PulseWidthS / Waveform.CompressedWidthS,
+    };
+
+    /// <summary>Pulses of a dwell at one of the PRFs: the number given, or those within one half-power beamwidth, rounded, at least 1.</summary>
+    public int PulsesPerDwell(double prfHz) =>
+        Processing.PulsesPerDwell ?? Math.Max(1, (int)Math.Round(BeamwidthPulses.Count(Antenna.Azimuth.BeamwidthRad, prfHz, Scan.BeamSpeedRadPerS)));
 }

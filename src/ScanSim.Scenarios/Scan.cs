@@ -7,10 +7,15 @@ public abstract record Scan
     {
     }
 
+    /// <summary>Angular speed of the beam while it scans, without sign.</summary>
+    public abstract double BeamSpeedRadPerS { get; }
+
     /// <summary>Full turns, clockwise, north at time 0.</summary>
     public sealed record Rotation : Scan
     {
         public required double PeriodS { get; init; }
+
+        public override double BeamSpeedRadPerS => 2 * Math.PI / PeriodS;
     }
 
     /// <summary>Sweeps to and fro between two azimuths: clockwise from From to To first; between sweeps the antenna turns round.</summary>
@@ -21,5 +26,7 @@ public abstract record Scan
         public required double RateRadPerS { get; init; }
 
         public required double TurnaroundS { get; init; }
+
+        public override double BeamSpeedRadPerS => RateRadPerS;
     }
 }

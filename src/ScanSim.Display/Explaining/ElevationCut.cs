@@ -12,7 +12,7 @@ internal sealed class ElevationCut(Antenna antenna)
 
     private const double RadPerDeg = Math.PI / 180;
 
-    private readonly SampledPattern pattern = new(PatternOf(antenna.Elevation, antenna.TiltRad), antenna.SideLobeFloorRatio);
+    private readonly SampledPattern pattern = new(antenna.Elevation.ToPattern(antenna.TiltRad), antenna.SideLobeFloorRatio);
     private readonly double floorDb = 2 * Decibels.FromRatio(antenna.SideLobeFloorRatio);
 
     /// <summary>
@@ -24,15 +24,4 @@ internal sealed class ElevationCut(Antenna antenna)
     public bool HoldsAtFloor(double elevationDeg, double beamDb) =>
         beamDb <= floorDb + RoundingDb
         && 2 * Decibels.FromRatio(pattern.GainRatio(Math.IEEERemainder(elevationDeg * RadPerDeg - antenna.TiltRad, 2 * Math.PI))) <= floorDb + RoundingDb;
-
-    private static Pattern PatternOf(PatternCut cut, double tiltRad) => cut switch
-    {
-        PatternCut.Gaussian => new GaussianPattern(cut.BeamwidthRad),
-        PatternCut.Uniform => new AperturePattern(ApertureTaper.Uniform, cut.BeamwidthRad),
-        PatternCut.Cosine => new AperturePattern(ApertureTaper.Cosine, cut.BeamwidthRad),
-        PatternCut.CosineSquared => new AperturePattern(ApertureTaper.CosineSquared, cut.BeamwidthRad),
-        PatternCut.CosecantSquared shaped => new CosecantSquaredPattern(shaped.BeamwidthRad, tiltRad, shaped.UpToRad),
-        PatternCut.Table table => new TablePattern(table.OffsetsRad.AsSpan(), table.LevelsDb.AsSpan()),
-        _ => throw new InvalidOperationException("unknown kind of pattern"),
-    };
 }

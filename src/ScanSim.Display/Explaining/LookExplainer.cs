@@ -21,6 +21,7 @@ public sealed class LookExplainer
     private readonly RangeUnit unit;
     private readonly Dictionary<string, Target> targets;
     private readonly ElevationCut elevationCut;
+    private readonly BeamShape beamShape;
     private readonly Dictionary<(FluctuationCase Case, int Pulses), (double EvenDb, double WantedDb)> needs = [];
 
     /// <summary>Begins to reason about one scenario.</summary>
@@ -33,6 +34,7 @@ public sealed class LookExplainer
         this.wantedPd = wantedPd;
         this.unit = unit;
         elevationCut = new ElevationCut(scenario.Radar.Antenna);
+        beamShape = new BeamShape(scenario.Radar);
         targets = scenario.Targets.ToDictionary(t => t.Id, StringComparer.Ordinal);
     }
 
@@ -40,14 +42,15 @@ public sealed class LookExplainer
     {
         var mates = cellMates.IsDefault ? [] : cellMates;
         var (evenDb, forWantedDb) = Needs(row);
-        var freeSpaceDb = row.RadarDb + row.RcsDb + row.SpreadingDb;
+        var shapeDb = beamShape.CentredDb(row.Pulses);
+        var freeSpaceDb = row.RadarDb + row.RcsDb + row.SpreadingDb + shapeDb;
         var beamDb = row.AzimuthBeamDb + row.ElevationBeamDb;
         var byElevation = elevationCut.HoldsAtFloor(row.ElevationDeg, beamDb);
         ImmutableArray<TermLoss> losses =
         [
             new(LookTerm.Range, evenDb - freeSpaceDb),
-            new(LookTerm.AzimuthBeam, byElevation ? 0 : -row.AzimuthBeamDb),
-            new(LookTerm.ElevationBeam, byElevation ? -beamDb : -row.ElevationBeamDb),
+            new(LookTerm.AzimuthBeam, byElevation ? 0 : shapeDb - row.AzimuthBeamDb),
+            new(LookTerm.ElevationBeam, byElevation ? shapeDb - beamDb : -row.ElevationBeamDb),
             new(LookTerm.Eclipsing, -row.EclipsingDb),
         ];
         return new LookExplanation
@@ -58,8 +61,8 @@ public sealed class LookExplainer
             NeededDb = evenDb,
             WantedPd = wantedPd,
             NeededForWantedDb = forWantedDb,
-            EvenOddsRangeM = RangeAtM(row, evenDb),
-            WantedRangeM = RangeAtM(row, forWantedDb),
+            EvenOddsRangeM = RangeAtM(row, evenDb - shapeDb),
+            WantedRangeM = RangeAtM(row, forWantedDb - shapeDb),
             Losses = losses,
             Outcome = byElevation && row.LostTo == LossReason.AzimuthBeam ? PassOutcome.ElevationBeam : OutcomeOf(row),
             Reason = LookWords.Of(row, row.SnrDb - evenDb, losses, mates),
@@ -81,7 +84,7 @@ public sealed class LookExplainer
         _ => PassOutcome.SharedCell,
     };
 
-    /// <summary>Where radar + RCS − 40 lg R is the SNR needed.</summary>
+    /// <summary>Where radar + RCS − 40 lg R is the SNR needed before the beam's shape.</summary>
     private static double RangeAtM(in LookRow row, double neededDb) =>
         Math.Sqrt(Math.Sqrt(Decibels.ToRatio(row.RadarDb + row.RcsDb - neededDb)));
 

@@ -6,8 +6,8 @@ namespace ScanSim.Display.Explaining;
 /// <summary>Why one look saw its target or missed it.</summary>
 /// <remarks>
 /// The margin over the SNR that even odds need is split without remainder: <see cref="MarginDb"/> = −Σ <see cref="Losses"/>. Azimuth
-/// beam, elevation beam and eclipsing are losses against the free-space SNR at the beam's peak; range is the spreading beyond
-/// <see cref="EvenOddsRangeM"/>. They are the row's terms but for one case: at the side-lobe floor, when the elevation alone holds the
+/// beam, elevation beam and eclipsing are losses against the free-space SNR of a dwell centred on the target; range is the spreading
+/// beyond <see cref="EvenOddsRangeM"/>. They are the row's terms but for one case: at the side-lobe floor, when the elevation alone holds the
 /// look there, the whole of the beam's loss counts as the elevation's (the row may have it under azimuth). The needed SNR supposes pulses of equal SNR: for fluctuation cases 2 and 4, where the beam weighs
 /// the pulses differently, Pd at margin 0 is not exactly one half.
 /// </remarks>
@@ -18,7 +18,7 @@ public sealed record LookExplanation
     /// <summary>Ids of the other targets in its cell, as far as the recording has their looks.</summary>
     public required ImmutableArray<string> CellMates { get; init; }
 
-    /// <summary>SNR per pulse in free space at the beam's peak: radar + RCS + spreading.</summary>
+    /// <summary>SNR per pulse in free space with the dwell centred on the target: radar + RCS + spreading + the beam's shape, which no dwell escapes.</summary>
     public required double FreeSpaceSnrDb { get; init; }
 
     /// <summary>SNR per pulse at which Pd is one half.</summary>
@@ -30,7 +30,7 @@ public sealed record LookExplanation
     /// <summary>SNR per pulse at which <see cref="WantedPd"/> is reached.</summary>
     public required double NeededForWantedDb { get; init; }
 
-    /// <summary>Range to which the target is seen with Pd one half, in free space at the beam's peak.</summary>
+    /// <summary>Range to which the target is seen with Pd one half, in free space with the dwell centred on it.</summary>
     public required double EvenOddsRangeM { get; init; }
 
     /// <summary>The same with <see cref="WantedPd"/>.</summary>

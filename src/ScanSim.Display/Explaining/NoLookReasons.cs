@@ -11,25 +11,6 @@ internal sealed class NoLookReasons(Scenario scenario, RangeUnit unit)
 {
     private const double DegPerRad = 180 / Math.PI;
 
-    /// <summary>SNR per pulse of 1 m² at 1 m at the peak of the beam.</summary>
-    public static double RadarDb(Scenario scenario)
-    {
-        var radar = scenario.Radar;
-        return Decibels.FromRatio(new RadarEquationTerms
-        {
-            PeakPowerW = radar.PeakPowerW,
-            TransmitGainRatio = radar.Antenna.GainRatio,
-            ReceiveGainRatio = radar.Antenna.GainRatio,
-            WavelengthM = Constants.SpeedOfLightMps / radar.CarrierHz,
-            RcsM2 = 1,
-            RangeM = 1,
-            LossRatio = radar.Losses.TotalRatio,
-            NoiseTemperatureK = radar.Receiver.SystemTemperatureK,
-            NoiseBandwidthHz = 1 / radar.Waveform.CompressedWidthS,
-            EnergyGainRatio = radar.Waveform.PulseWidthS / radar.Waveform.CompressedWidthS,
-        }.SnrRatio());
-    }
-
     public NoLookExplanation Explain(in TruthRow row, Target target)
     {
         var (outcome, reason) = row.View switch
@@ -84,8 +65,8 @@ internal sealed class NoLookReasons(Scenario scenario, RangeUnit unit)
             return (PassOutcome.TooWeakForLook, "no look: the whole echo came while the receiver was shut");
         }
 
-        var snrDb = RadarDb(scenario) + Decibels.FromRatio(target.RcsM2) - 4 * Decibels.FromRatio(rangeM) + Decibels.FromRatio(openRatio);
-        var summedDb = snrDb + Decibels.FromRatio(MostPulses());
+        var snrDb = Decibels.FromRatio(scenario.Radar.EquationTerms().SnrRatio()) + Decibels.FromRatio(target.RcsM2) - 4 * Decibels.FromRatio(rangeM) + Decibels.FromRatio(openRatio);
+        var summedDb = snrDb + Decibels.FromRatio(waveform.PrfHz.Max(scenario.Radar.PulsesPerDwell));
         if (summedDb < LookExplainer.SummedSnrFloorDb)
         {
             return (PassOutcome.TooWeakForLook, $"signal too weak for a look: {snrDb:0.0} dB per pulse at the beam's peak, summed more than 20 dB below one pulse's noise");
@@ -96,23 +77,6 @@ internal sealed class NoLookReasons(Scenario scenario, RangeUnit unit)
         return offsetDeg * 2 > antenna.Elevation.BeamwidthRad * DegPerRad
             ? (PassOutcome.TooWeakForLook, $"signal too weak for a look: {offsetDeg:0.0}° off the beam's elevation, summed more than 20 dB below one pulse's noise")
             : (PassOutcome.NoDwell, $"no look: {snrDb:0.0} dB per pulse at the beam's peak, but no dwell of this scan met it there");
-    }
-
-    private double MostPulses()
-    {
-        var radar = scenario.Radar;
-        if (radar.Processing.PulsesPerDwell is { } pulses)
-        {
-            return pulses;
-        }
-
-        var beamRadPerS = radar.Scan switch
-        {
-            Scan.Rotation rotation => 2 * Math.PI / rotation.PeriodS,
-            Scan.Sector sector => sector.RateRadPerS,
-            _ => throw new InvalidOperationException("unknown kind of scan"),
-        };
-        return Math.Max(1, Math.Round(radar.Antenna.Azimuth.BeamwidthRad / beamRadPerS * radar.Waveform.PrfHz.Max()));
     }
 
     private string Range(double rangeM) => unit == RangeUnit.NauticalMile ? $"{rangeM / 1852:0.00} nmi" : $"{rangeM / 1000:0.00} km";

@@ -6,7 +6,7 @@ public enum PassOutcome
     /// <summary>A look that gave a hit; of a pass: one that gave a plot.</summary>
     Seen = 0,
 
-    /// <summary>Too weak even at the beam's peak and without eclipsing.</summary>
+    /// <summary>Too weak even with the dwell centred on it and without eclipsing.</summary>
     Range = 1,
 
     AzimuthBeam = 2,

@@ -76,9 +76,21 @@ public sealed class LookExplainerTests
     public void At_the_even_odds_range_the_free_space_SNR_is_what_is_needed()
     {
         var look = new LookExplainer(Scenario).Explain(Row(5, -2, 0, 0, LossReason.Range, pulses: 9));
-        Assert.Equal(look.NeededDb, look.Row.RadarDb + look.Row.RcsDb - 40 * Math.Log10(look.EvenOddsRangeM), 1e-9);
-        Assert.Equal(look.NeededForWantedDb, look.Row.RadarDb + look.Row.RcsDb - 40 * Math.Log10(look.WantedRangeM), 1e-9);
+        Assert.Equal(look.NeededDb, look.FreeSpaceSnrDb - look.Row.SpreadingDb - 40 * Math.Log10(look.EvenOddsRangeM), 1e-9);
+        Assert.Equal(look.NeededForWantedDb, look.FreeSpaceSnrDb - look.Row.SpreadingDb - 40 * Math.Log10(look.WantedRangeM), 1e-9);
         Assert.True(look.WantedRangeM < look.EvenOddsRangeM);
+    }
+
+    [Fact]
+    public void A_dwell_of_a_beamwidth_that_is_centred_on_the_target_loses_nothing_to_azimuth()
+    {
+        // 15 pulses of the 1.2 degree cosine beam at 24 rpm and 1800 Hz: about the 1.67 dB of a Gaussian beam over its half-power width.
+        var shapeDb = new BeamShape(Scenario.Radar).CentredDb(Scenario.Radar.PulsesPerDwell(Scenario.Radar.Waveform.PrfHz[0]));
+        Assert.InRange(shapeDb, -1.8, -1.3);
+        var row = Row(5, shapeDb, 0, 0, LossReason.Range, Scenario.Radar.PulsesPerDwell(Scenario.Radar.Waveform.PrfHz[0]));
+        var look = new LookExplainer(Scenario).Explain(row);
+        Assert.Equal(0, look.LossDb(LookTerm.AzimuthBeam), 1e-12);
+        Assert.Equal(-look.MarginDb, look.LossDb(LookTerm.Range), 1e-9);
     }
 
     [Fact]
