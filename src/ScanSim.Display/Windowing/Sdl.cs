@@ -105,6 +105,9 @@ internal static partial class Sdl
     [LibraryImport(Library, EntryPoint = "SDL_UnlockTexture")]
     public static partial void UnlockTexture(nint texture);
 
+    [LibraryImport(Library, EntryPoint = "SDL_RenderClear")]
+    public static partial int RenderClear(nint renderer);
+
     [LibraryImport(Library, EntryPoint = "SDL_RenderCopy")]
     public static partial int RenderCopy(nint renderer, nint texture, nint from, nint to);
 

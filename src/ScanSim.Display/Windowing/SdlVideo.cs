@@ -22,6 +22,7 @@ internal sealed class SdlVideo : IDisposable
         try
         {
             Sdl.GetVersion(out var version);
+            CharacterLocale.UseUtf8();
             SetHints();
             if (Sdl.InitSubSystem(Sdl.InitVideo) != 0)
             {

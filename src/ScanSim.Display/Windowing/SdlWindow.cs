@@ -12,6 +12,7 @@ public sealed class SdlWindow : IDisposable
     private IWindowPixels pixels = new NoPixels();
     private string title;
     private float wantedScale = 1;
+    private (int Width, int Height) leastSize;
 
     private SdlWindow(SdlVideo video, string title, float? scale)
     {
@@ -142,6 +143,7 @@ public sealed class SdlWindow : IDisposable
         {
             Sdl.DestroyWindow(window);
             window = 0;
+            leastSize = default;
         }
     }
 
@@ -246,8 +248,13 @@ public sealed class SdlWindow : IDisposable
         Scale = WindowScale.Fitting(wantedScale, size);
         translation.Scale = Scale;
         translation.UnitsPerCoordinate = pixelsPerCoordinate / Scale;
-        var (leastWidth, leastHeight) = OnScreen(WindowScale.LeastWidth, WindowScale.LeastHeight, pixelsPerCoordinate);
-        Sdl.SetWindowMinimumSize(window, leastWidth, leastHeight);
+        var least = OnScreen(WindowScale.LeastWidth, WindowScale.LeastHeight, pixelsPerCoordinate);
+        if (least != leastSize)
+        {
+            // Only then: on X it also moves the window to where SDL last knew it.
+            leastSize = least;
+            Sdl.SetWindowMinimumSize(window, least.Width, least.Height);
+        }
     }
 
     /// <summary>To a size in layout units, where the screen's scale makes that another than the window was created with.</summary>

@@ -34,7 +34,7 @@ internal sealed class TexturePixels : IWindowPixels
         var info = new SKImageInfo(size.Width, size.Height, SKColorType.Bgra8888, SKAlphaType.Opaque);
         var drawn = SurfacePixels.Draw(info, pixels, pitchBytes, draw);
         Sdl.UnlockTexture(texture);
-        if (!drawn || Sdl.RenderCopy(renderer, texture, 0, 0) != 0)
+        if (!drawn || Sdl.RenderClear(renderer) != 0 || Sdl.RenderCopy(renderer, texture, 0, 0) != 0)
         {
             return false;
         }

@@ -27,11 +27,13 @@ public sealed class SdlWindowTests(VirtualDisplay display)
         Assert.Equal(!texture, window.DrewOnSurface);
     }
 
-    [Fact]
-    public void A_screen_begins_with_its_size_and_hears_of_each_new_one()
+    [Theory]
+    [InlineData(false)]
+    [InlineData(true)]
+    public void A_screen_begins_with_its_size_and_hears_of_each_new_one(bool texture)
     {
         display.Require();
-        using var window = new OpenedWindow(display);
+        using var window = new OpenedWindow(display, tryTexture: texture);
         var first = window.Screen.Events.First();
         Assert.Equal((WindowEventKind.Resized, 1000f, 700f, 1f), (first.Kind, first.X, first.Y, first.Scale));
         display.Do("windowsize", window.Id, "1200", "900");
@@ -190,7 +192,11 @@ public sealed class SdlWindowTests(VirtualDisplay display)
         using var window = new OpenedWindow(display);
         window.Screen.Heading = "Häfen – 12:00";
         display.Do("key", "z");
-        window.Until(() => System.Text.Encoding.UTF8.GetString(display.Tool("xdotool", "getwindowname", window.Id)).Trim() == "Häfen – 12:00", "the title");
+        var read = "";
+        window.Until(
+            () => (read = System.Text.Encoding.UTF8.GetString(display.Tool("xdotool", "getwindowname", window.Id)).Trim()) == window.Screen.Heading,
+            "the title",
+            () => read + string.Join("\n", window.Screen.Events));
     }
 
     [Fact]
@@ -198,7 +204,7 @@ public sealed class SdlWindowTests(VirtualDisplay display)
     {
         display.Require();
         using var window = new OpenedWindow(display);
-        display.Do("windowquit", window.Id);
+        XCloseButton.Press(display.Name, ulong.Parse(window.Id, System.Globalization.CultureInfo.InvariantCulture));
         window.AwaitEvent(e => e.Kind == WindowEventKind.Quit, "the quit");
         window.AwaitEnd();
     }

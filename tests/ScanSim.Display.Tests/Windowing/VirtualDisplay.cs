@@ -59,7 +59,7 @@ public sealed class VirtualDisplay : IDisposable
 
     public byte[] Tool(string program, params string[] words)
     {
-        var start = new ProcessStartInfo(program) { UseShellExecute = false, RedirectStandardOutput = true, Environment = { ["DISPLAY"] = Name } };
+        var start = new ProcessStartInfo(program) { UseShellExecute = false, RedirectStandardOutput = true, Environment = { ["DISPLAY"] = Name, ["LC_ALL"] = "C.UTF-8" } };
         foreach (var word in words)
         {
             start.ArgumentList.Add(word);
