@@ -11,8 +11,7 @@ public static class Picture
     public static void Save(Scene scene, ViewOptions view, double timeS, PictureSize size, string path) =>
         Write(path, size, scene, (canvas, forSvg) => new Painter(scene) { ForSvg = forSvg }.Paint(canvas, size, view, timeS));
 
-    /// <summary>The same for anything that can be painted; name and date come from the scene.</summary>
-    /// <param name="paint">Gets a canvas in pixels, and whether it becomes SVG.</param>
+    /// <summary>The same for anything that can be painted onto a canvas in pixels, told whether it becomes SVG; name and date come from the scene.</summary>
     internal static void Write(string path, PictureSize size, Scene scene, Action<SKCanvas, bool> paint)
     {
         var draw = FormatOf(path);

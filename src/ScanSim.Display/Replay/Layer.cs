@@ -12,7 +12,7 @@ internal sealed class Layer : IDisposable
     /// <summary>How often it was painted anew.</summary>
     public int Renewals { get; private set; }
 
-    /// <summary>Puts the layer on a canvas that is scaled by <paramref name="scale"/> from pixels; without a cache (pictures to save) paints straight onto it.</summary>
+    /// <summary>Puts the layer on the frame; without a cache (pictures to save) paints straight onto it.</summary>
     /// <param name="frame">The canvas and its scale.</param>
     /// <param name="area">In layout units.</param>
     /// <param name="key">Equal as long as the layer would look the same.</param>

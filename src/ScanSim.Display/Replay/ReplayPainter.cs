@@ -8,7 +8,6 @@ internal sealed class ReplayPainter : IDisposable
 {
     private const string Caution = "Planning estimate from models, not proof of performance.";
     private readonly ReplayPlan[] plans = [new ReplayPlan(), new ReplayPlan()];
-    private readonly ReplayPanel panel = new();
     private readonly ReplayTimeline timeline = new();
 
     /// <summary>Where each piece of text was set is added here, if given.</summary>
@@ -23,7 +22,7 @@ internal sealed class ReplayPainter : IDisposable
             plans[i].Paint(frame, sheet, state, world, i, layout.Plans[i]);
         }
 
-        panel.Paint(frame, sheet, state, world, looks, layout.Panel);
+        ReplayPanel.Paint(sheet, state, world, looks, layout.Panel);
         timeline.Paint(frame, sheet, state, world, layout);
         PaintHeader(sheet, state, world, layout.Header);
         PaintFoot(sheet, state, layout.Foot);
@@ -45,7 +44,6 @@ internal sealed class ReplayPainter : IDisposable
             plan.Dispose();
         }
 
-        panel.Dispose();
         timeline.Dispose();
     }
 

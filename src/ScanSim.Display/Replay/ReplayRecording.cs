@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using ScanSim.Display.Explaining;
 using ScanSim.Recordings;
 using ScanSim.Scenarios;
 
@@ -17,6 +18,7 @@ public sealed class ReplayRecording
         Name = name;
         Facts = [.. scene.Targets.Select(target => TargetFacts.Of(target))];
         Shades = SnrShades.Of(scene);
+        Explainer = new LookExplainer(scenario);
     }
 
     /// <summary>Name of the folder, to tell two recordings of one scenario apart.</summary>
@@ -32,13 +34,16 @@ public sealed class ReplayRecording
 
     internal SnrShades Shades { get; }
 
+    /// <summary>For the thread that paints.</summary>
+    internal LookExplainer Explainer { get; }
+
+    /// <summary>Opens the recording in a folder.</summary>
     /// <exception cref="RecordingException">The folder is no recording, or a table is damaged.</exception>
     /// <exception cref="ScenarioException">Its scenario.json is not valid for this version.</exception>
     public static ReplayRecording Open(string folder)
     {
-        var recording = Recording.Open(folder);
-        var scenario = ScenarioFile.Parse(recording.ScenarioText, "scenario.json of the recording");
-        return Open(folder, recording, scenario);
+        var opened = Recording.Open(folder);
+        return Open(folder, opened, ScenarioFile.Parse(opened.ScenarioText, "scenario.json of the recording"));
     }
 
     internal static ReplayRecording Open(string folder, Recording recording, Scenario scenario) =>

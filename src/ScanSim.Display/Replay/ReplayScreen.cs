@@ -12,6 +12,7 @@ public sealed class ReplayScreen : IScreen, IDisposable
     private readonly ReplaySettings settings;
     private ReplayWorld world;
 
+    /// <summary>Starts a replay.</summary>
     /// <param name="recordings">One, or two to be shown in step.</param>
     /// <param name="settings">How it starts.</param>
     public ReplayScreen(ImmutableArray<ReplayRecording> recordings, ReplaySettings settings)
