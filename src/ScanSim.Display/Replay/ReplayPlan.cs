@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using ScanSim.Display.Overlays;
 using ScanSim.Display.Painting;
 using ScanSim.Recordings;
 using SkiaSharp;
@@ -26,7 +27,7 @@ internal sealed class ReplayPlan : IDisposable
         var furniture = new PlanFurniture(sheet, projection, scene.SiteName, state.Unit, []);
         var grid = new PlanGrid(sheet, projection, scene.InstrumentedRangeM, world.RangeM(state), state.Unit, furniture.Boxes);
         var key = (state.CentreEastM, state.CentreNorthM, state.RangeM, state.UpRad, state.Unit, state.Theme, (state.ShowOverlays, index), trailS);
-        ground.Show(frame, area, key, canvas => PaintGround(new Sheet(canvas, sheet.Colours, frame.ForSvg, null), area, projection, furniture, grid, scene, view, trailS));
+        ground.Show(frame, area, key, canvas => PaintGround(new Sheet(canvas, sheet.Colours, frame.ForSvg, null), area, projection, furniture, grid, scene, view, trailS, state.ShowOverlays ? world.Overlays : []));
 
         sheet.Canvas.Save();
         sheet.Canvas.ClipRect(area);
@@ -71,11 +72,12 @@ internal sealed class ReplayPlan : IDisposable
         return Math.Floor(timeS / stepS) * stepS;
     }
 
-    private static void PaintGround(Sheet sheet, SKRect area, PlanProjection projection, PlanFurniture furniture, PlanGrid grid, Scene scene, ViewOptions view, double trailS)
+    private static void PaintGround(Sheet sheet, SKRect area, PlanProjection projection, PlanFurniture furniture, PlanGrid grid, Scene scene, ViewOptions view, double trailS, ImmutableArray<Overlay> overlays)
     {
         using (sheet)
         {
             sheet.Rect(area, sheet.Colours.Ground);
+            OverlayPainter.Paint(sheet, projection, overlays);
             var marks = new PlanMarks(sheet, projection, scene, view, trailS);
             marks.PaintBlanked();
             grid.With(sheet).PaintLines();

@@ -28,6 +28,7 @@ public sealed class ReplayScreen : IScreen, IDisposable
             Recordings = recordings,
             Stretches = [.. recordings.Select(_ => ReplayStretch.Nothing)],
             Rows = ReplayRow.Of(recordings, RowOrder.Scenario),
+            Overlays = settings.Overlays,
         };
         reading = new ReplayReading(recordings);
         State = (new ReplayState

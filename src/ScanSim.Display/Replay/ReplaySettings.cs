@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using ScanSim.Display.Overlays;
 
 namespace ScanSim.Display.Replay;
 
@@ -19,6 +20,9 @@ public sealed record ReplaySettings
 
     /// <summary>Id of the target selected at first.</summary>
     public string? Selected { get; init; }
+
+    /// <summary>Drawn under the plans, in metres from the site.</summary>
+    public ImmutableArray<Overlay> Overlays { get; init; } = [];
 
     /// <summary>Where pictures are saved.</summary>
     public string SaveFolder { get; init; } = ".";

@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using ScanSim.Display.Overlays;
 
 namespace ScanSim.Display.Replay;
 
@@ -12,6 +13,8 @@ internal sealed record ReplayWorld
 
     /// <summary>All targets, each once, in the order asked for.</summary>
     public required ImmutableArray<ReplayRow> Rows { get; init; }
+
+    public ImmutableArray<Overlay> Overlays { get; init; } = [];
 
     public ReplayRecording First => Recordings[0];
 
