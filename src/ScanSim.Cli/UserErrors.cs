@@ -1,4 +1,5 @@
 using ScanSim.Display;
+using ScanSim.Display.Overlays;
 using ScanSim.Recordings;
 using ScanSim.Scenarios;
 
@@ -29,7 +30,7 @@ internal static class UserErrors
     }
 
     private static bool IsTheUsers(Exception error) =>
-        error is ScenarioException or RecordingException or PictureException or InputException or IOException or UnauthorizedAccessException;
+        error is ScenarioException or RecordingException or PictureException or OverlayException or InputException or IOException or UnauthorizedAccessException;
 
     private static int Tell(Exception error)
     {

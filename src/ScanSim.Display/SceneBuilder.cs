@@ -57,8 +57,7 @@ public sealed class SceneBuilder : IRecordingSink
         {
             if (row.TimeS >= PlotsFromS && row.TimeS <= PlotsToS)
             {
-                var (sin, cos) = Math.SinCos(row.AzimuthDeg * (Math.PI / 180));
-                plots.Add(new PlotMark(row.TimeS, row.Scan, (float)(row.RangeM * sin), (float)(row.RangeM * cos), row.Kind));
+                plots.Add(MarkOf(row));
             }
 
             if (row.Kind == EchoKind.Target)
@@ -96,6 +95,18 @@ public sealed class SceneBuilder : IRecordingSink
             Targets = [.. scenario.Targets.Select(t => gatherings[t.Id].Build(anyLooks))],
             Scans = [.. scans],
             Plots = [.. plots],
+        };
+    }
+
+    /// <summary>A plot's place on the plan.</summary>
+    internal static PlotMark MarkOf(in PlotRow row)
+    {
+        var (sin, cos) = Math.SinCos(row.AzimuthDeg * (Math.PI / 180));
+        return new PlotMark(row.TimeS, row.Scan, (float)(row.RangeM * sin), (float)(row.RangeM * cos), row.Kind)
+        {
+            SnrDb = (float)row.SnrDb,
+            Hits = row.Hits,
+            Target = row.Target,
         };
     }
 

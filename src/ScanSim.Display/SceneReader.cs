@@ -15,6 +15,10 @@ public static class SceneReader
     public static Scene Load(Recording recording, double plotsFromS = double.NegativeInfinity, double plotsToS = double.PositiveInfinity) =>
         Load(recording, ScenarioFile.Parse(recording.ScenarioText, "scenario.json of the recording"), plotsFromS, plotsToS);
 
+    /// <summary>The whole timeline and no plot.</summary>
+    internal static Scene LoadWithoutPlots(Recording recording, Scenario scenario) =>
+        Load(recording, scenario, double.PositiveInfinity, double.NegativeInfinity);
+
     /// <summary>The same with a scenario that was read before.</summary>
     public static Scene Load(Recording recording, Scenario scenario, double plotsFromS, double plotsToS)
     {

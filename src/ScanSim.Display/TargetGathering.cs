@@ -17,7 +17,10 @@ internal sealed class TargetGathering(Target target, double reachS)
     {
         var (sin, cos) = Math.SinCos(row.AzimuthDeg * (Math.PI / 180));
         truth.Add(new TruthMark(
-            row.TimeS, row.Scan, (float)(row.RangeM * sin), (float)(row.RangeM * cos), (float)row.EastMps, (float)row.NorthMps, row.View));
+            row.TimeS, row.Scan, (float)(row.RangeM * sin), (float)(row.RangeM * cos), (float)row.EastMps, (float)row.NorthMps, row.View)
+        {
+            HeightM = (float)row.HeightM,
+        });
     }
 
     /// <summary>Keeps one look a scan: the strongest detected one, or the strongest if none was detected.</summary>

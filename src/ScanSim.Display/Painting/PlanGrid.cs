@@ -14,7 +14,7 @@ internal sealed class PlanGrid
     /// <summary>Where ring labels stand, in degrees, in order of preference: between the 30 degree lines.</summary>
     private static readonly int[] RingLabelBearingsDeg = [45, 135, 225, 315, 75, 105, 255, 285, 15, 165, 195, 345];
 
-    private readonly Sheet sheet;
+    private Sheet sheet;
     private readonly PlanProjection plan;
     private readonly double instrumentedRangeM;
     private readonly IReadOnlyList<SKRect> taken;
@@ -44,6 +44,14 @@ internal sealed class PlanGrid
     {
         var metres = RangeText.MetresPerUnit(unit);
         return NiceStep.AtLeast(Math.Max(shownRangeM / 6, LeastRingGapPx * metresPerPx) / metres) * metres;
+    }
+
+    /// <summary>The same grid on another sheet.</summary>
+    public PlanGrid With(Sheet other)
+    {
+        var copy = (PlanGrid)MemberwiseClone();
+        copy.sheet = other;
+        return copy;
     }
 
     public void PaintLines()
@@ -118,7 +126,7 @@ internal sealed class PlanGrid
     {
         var inner = SKRect.Inflate(plan.Area, -18, -12);
         var origin = plan.Origin;
-        var (sin, cos) = Math.SinCos(bearingRad);
+        var (sin, cos) = Math.SinCos(bearingRad - plan.UpRad);
         var leave = plan.ToPx(instrumentedRangeM) - 20.0;
         leave = Math.Min(leave, Along(sin, inner.Left - origin.X, inner.Right - origin.X));
         leave = Math.Min(leave, Along(-cos, inner.Top - origin.Y, inner.Bottom - origin.Y));

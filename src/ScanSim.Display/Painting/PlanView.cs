@@ -52,10 +52,10 @@ internal static class PlanView
     /// <summary>Two marks along the course stroke: a label prefers the other sides.</summary>
     private static IEnumerable<SKPoint> CourseMarks(TargetNow target)
     {
-        var speed = MathF.Sqrt(target.EastMps * target.EastMps + target.NorthMps * target.NorthMps);
+        var speed = MathF.Sqrt(target.RightMps * target.RightMps + target.UpMps * target.UpMps);
         if (target.IsInView && speed > 0)
         {
-            var (ux, uy) = (target.EastMps / speed, -target.NorthMps / speed);
+            var (ux, uy) = (target.RightMps / speed, -target.UpMps / speed);
             yield return new SKPoint(target.Position.X + 9 * ux, target.Position.Y + 9 * uy);
             yield return new SKPoint(target.Position.X + 12 * ux, target.Position.Y + 12 * uy);
         }
@@ -63,7 +63,7 @@ internal static class PlanView
 
     private static SKRect CountBox(SKRect area) => new(area.Right - 190, area.Bottom - 28, area.Right, area.Bottom);
 
-    private static void PaintLabels(Sheet sheet, SKRect area, LabelLayout layout)
+    public static void PaintLabels(Sheet sheet, SKRect area, LabelLayout layout)
     {
         foreach (var label in layout.Placed)
         {

@@ -1,0 +1,124 @@
+using ScanSim.Physics;
+using ScanSim.Physics.Earth;
+using ScanSim.Physics.Waveforms;
+using ScanSim.Recordings;
+using ScanSim.Scenarios;
+
+namespace ScanSim.Display.Explaining;
+
+/// <summary>Why a scan has no look at a target: geometry, timeline, or too little signal.</summary>
+internal sealed class NoLookReasons(Scenario scenario, RangeUnit unit)
+{
+    /// <summary>Signal, summed over the pulses, to the noise of one pulse, below which a run computes no look (docs/engine.md).</summary>
+    public const double SummedSnrFloorDb = -20;
+
+    private const double DegPerRad = 180 / Math.PI;
+
+    /// <summary>SNR per pulse of 1 m² at 1 m at the peak of the beam.</summary>
+    public static double RadarDb(Scenario scenario)
+    {
+        var radar = scenario.Radar;
+        return Decibels.FromRatio(new RadarEquationTerms
+        {
+            PeakPowerW = radar.PeakPowerW,
+            TransmitGainRatio = radar.Antenna.GainRatio,
+            ReceiveGainRatio = radar.Antenna.GainRatio,
+            WavelengthM = Constants.SpeedOfLightMps / radar.CarrierHz,
+            RcsM2 = 1,
+            RangeM = 1,
+            LossRatio = radar.Losses.TotalRatio,
+            NoiseTemperatureK = radar.Receiver.SystemTemperatureK,
+            NoiseBandwidthHz = 1 / radar.Waveform.CompressedWidthS,
+            EnergyGainRatio = radar.Waveform.PulseWidthS / radar.Waveform.CompressedWidthS,
+        }.SnrRatio());
+    }
+
+    public NoLookExplanation Explain(in TruthRow row, Target target)
+    {
+        var (outcome, reason) = row.View switch
+        {
+            TargetView.BelowHorizon => (PassOutcome.BelowHorizon, Horizon(row)),
+            TargetView.BeyondInstrumentedRange => (PassOutcome.BeyondInstrumentedRange, Beyond(row)),
+            TargetView.Blanked => (PassOutcome.Blanked, Blanked(row)),
+            TargetView.OutsideSector => (PassOutcome.OutsideSector, Outside(row)),
+            _ => InView(row, target),
+        };
+        return new NoLookExplanation { Row = row, Outcome = outcome, Reason = reason };
+    }
+
+    private string Horizon(in TruthRow row)
+    {
+        var earth = new EffectiveEarth(scenario.Environment.EffectiveEarthFactor * EarthRadius.GaussianMeanM(scenario.Site.LatitudeRad));
+        var antennaM = scenario.Site.AntennaAltitudeM;
+        var groundM = Math.Sqrt(row.EastM * row.EastM + row.NorthM * row.NorthM);
+        var seenM = earth.HorizonDistanceM(antennaM) + earth.HorizonDistanceM(row.HeightM);
+        return $"below the horizon by {Range(groundM - seenM)}: {Range(groundM)} away over ground, in sight to {Range(seenM)} (antenna {antennaM:0.#} m, target {row.HeightM:0.#} m above sea level)";
+    }
+
+    private string Beyond(in TruthRow row)
+    {
+        var reachM = scenario.Radar.InstrumentedRangeM;
+        var apparentM = RangeAmbiguity.ApparentRangeM(row.RangeM, 1 / scenario.Radar.Waveform.PrfHz.Max());
+        return apparentM < row.RangeM
+            ? $"beyond the instrumented range of {Range(reachM)}: its echo comes in the next interval, as if from {Range(apparentM)}"
+            : $"beyond the instrumented range of {Range(reachM)} by {Range(row.RangeM - reachM)}";
+    }
+
+    private string Blanked(in TruthRow row)
+    {
+        var azimuthRad = row.AzimuthDeg / DegPerRad;
+        var sector = scenario.Radar.Blanked.FirstOrDefault(s => s.Contains(azimuthRad));
+        return sector == default ? $"in a blanked sector (bearing {row.AzimuthDeg:000.0}°)" : $"in the blanked sector {Sector(sector)} (bearing {row.AzimuthDeg:000.0}°)";
+    }
+
+    private string Outside(in TruthRow row) => scenario.Radar.Scan is Scan.Sector scan
+        ? $"outside the sector scan {Sector(scan.Limits)} (bearing {row.AzimuthDeg:000.0}°)"
+        : $"outside the scan (bearing {row.AzimuthDeg:000.0}°)";
+
+    /// <summary>In view without a look: too little signal even at the beam's peak, or the beam did not bring it.</summary>
+    private (PassOutcome Outcome, string Reason) InView(in TruthRow row, Target target)
+    {
+        // The dwells' own repetition intervals and lengths are the engine's affair: the best of them decides here.
+        var waveform = scenario.Radar.Waveform;
+        var rangeM = row.RangeM;
+        var openRatio = waveform.PrfHz.Max(prfHz => Eclipsing.PowerRatio(rangeM, waveform.PulseWidthS, 1 / prfHz));
+        if (openRatio == 0)
+        {
+            return (PassOutcome.TooWeakForLook, "no look: the whole echo came while the receiver was shut");
+        }
+
+        var snrDb = RadarDb(scenario) + Decibels.FromRatio(target.RcsM2) - 4 * Decibels.FromRatio(rangeM) + Decibels.FromRatio(openRatio);
+        var summedDb = snrDb + Decibels.FromRatio(MostPulses());
+        if (summedDb < SummedSnrFloorDb)
+        {
+            return (PassOutcome.TooWeakForLook, $"signal too weak for a look: {snrDb:0.0} dB per pulse at the beam's peak, summed more than 20 dB below one pulse's noise");
+        }
+
+        var antenna = scenario.Radar.Antenna;
+        var offsetDeg = Math.Abs(row.ElevationDeg - antenna.TiltRad * DegPerRad);
+        return offsetDeg * 2 > antenna.Elevation.BeamwidthRad * DegPerRad
+            ? (PassOutcome.TooWeakForLook, $"signal too weak for a look: {offsetDeg:0.0}° off the beam's elevation, summed more than 20 dB below one pulse's noise")
+            : (PassOutcome.NoDwell, $"no look: {snrDb:0.0} dB per pulse at the beam's peak, but no dwell of this scan met it there");
+    }
+
+    private double MostPulses()
+    {
+        var radar = scenario.Radar;
+        if (radar.Processing.PulsesPerDwell is { } pulses)
+        {
+            return pulses;
+        }
+
+        var beamRadPerS = radar.Scan switch
+        {
+            Scan.Rotation rotation => 2 * Math.PI / rotation.PeriodS,
+            Scan.Sector sector => sector.RateRadPerS,
+            _ => throw new InvalidOperationException("unknown kind of scan"),
+        };
+        return Math.Max(1, Math.Round(radar.Antenna.Azimuth.BeamwidthRad / beamRadPerS * radar.Waveform.PrfHz.Max()));
+    }
+
+    private string Range(double rangeM) => unit == RangeUnit.NauticalMile ? $"{rangeM / 1852:0.00} nmi" : $"{rangeM / 1000:0.00} km";
+
+    private static string Sector(AzimuthSector sector) => $"{sector.FromRad * DegPerRad:000}° to {sector.ToRad * DegPerRad:000}°";
+}
