@@ -13,9 +13,9 @@ internal static partial class CharacterLocale
 
     public static void UseUtf8()
     {
-        if (OperatingSystem.IsLinux())
+        // The user's own where it has all letters, as old window managers want the title in it. If there is none, the title is all that suffers.
+        if (OperatingSystem.IsLinux() && Marshal.PtrToStringUTF8(SetLocale(LcCtype, ""))?.Contains("UTF", StringComparison.OrdinalIgnoreCase) != true)
         {
-            // If the system has none, the title is all that suffers.
             _ = SetLocale(LcCtype, "C.UTF-8");
         }
     }

@@ -21,14 +21,14 @@ internal sealed class OpenedWindow : IDisposable
         thread = new Thread(() => Live(scale, tryTexture, width, height, measurement));
         thread.Start();
         Until(() => Screen.Frames > 0, "the first frame");
-        Id = System.Text.Encoding.ASCII.GetString(display.Tool("xdotool", "search", "--sync", "--onlyvisible", "--name", "first title")).Trim();
-        display.Do("windowmove", "--sync", Id, "0", "0");
-        display.Do("windowfocus", "--sync", Id);
+        Until(() => (Id = display.FindWindow()).Length > 0, "the window on the display");
+        display.Do("windowmove", Id, "0", "0");
+        display.Do("windowfocus", Id);
     }
 
     public RecordingScreen Screen { get; }
 
-    public string Id { get; }
+    public string Id { get; private set; } = "";
 
     public bool DrewOnSurface { get; private set; }
 

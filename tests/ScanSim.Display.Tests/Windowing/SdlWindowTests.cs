@@ -192,11 +192,7 @@ public sealed class SdlWindowTests(VirtualDisplay display)
         using var window = new OpenedWindow(display);
         window.Screen.Heading = "Häfen – 12:00";
         display.Do("key", "z");
-        var read = "";
-        window.Until(
-            () => (read = System.Text.Encoding.UTF8.GetString(display.Tool("xdotool", "getwindowname", window.Id)).Trim()) == window.Screen.Heading,
-            "the title",
-            () => read + string.Join("\n", window.Screen.Events));
+        window.Until(() => display.TitleOf(window.Id) == window.Screen.Heading, "the title", () => display.TitleOf(window.Id));
     }
 
     [Fact]

@@ -54,26 +54,20 @@ public sealed class VirtualDisplay : IDisposable
         }
     }
 
-    /// <summary>Real input by the X server's test extension; words as of xdotool.</summary>
-    public void Do(params string[] words) => Tool("xdotool", words);
-
-    public byte[] Tool(string program, params string[] words)
+    /// <summary>Real input by the X server's test extension; words as of xdotool. Never its --sync, which can wait for ever.</summary>
+    public void Do(params string[] words)
     {
-        var start = new ProcessStartInfo(program) { UseShellExecute = false, RedirectStandardOutput = true, Environment = { ["DISPLAY"] = Name, ["LC_ALL"] = "C.UTF-8" } };
-        foreach (var word in words)
-        {
-            start.ArgumentList.Add(word);
-        }
-
-        using var process = Process.Start(start)!;
-        using var output = new MemoryStream();
-        process.StandardOutput.BaseStream.CopyTo(output);
-        Assert.True(process.WaitForExit(TimeSpan.FromSeconds(30)) && process.ExitCode == 0, $"{program} {string.Join(' ', words)} failed");
-        return output.ToArray();
+        var (exitCode, _) = Run("xdotool", words);
+        Assert.True(exitCode == 0, $"xdotool {string.Join(' ', words)} failed");
     }
 
+    /// <summary>The number of this process's window, or nothing.</summary>
+    public string FindWindow() => Encoding.ASCII.GetString(Run("xdotool", "search", "--onlyvisible", "--pid", $"{Environment.ProcessId}").Output).Trim();
+
+    public string TitleOf(string window) => Encoding.UTF8.GetString(Run("xdotool", "getwindowname", window).Output).Trim();
+
     /// <summary>What the screen shows.</summary>
-    public SKBitmap Photograph() => SKBitmap.Decode(Tool("import", "-window", "root", "png:-"));
+    public SKBitmap Photograph() => SKBitmap.Decode(Run("import", "-window", "root", "png:-").Output);
 
     public void Dispose()
     {
@@ -83,6 +77,25 @@ public sealed class VirtualDisplay : IDisposable
             server.WaitForExit();
             server.Dispose();
         }
+    }
+
+    private (int ExitCode, byte[] Output) Run(string program, params string[] words)
+    {
+        var start = new ProcessStartInfo(program) { UseShellExecute = false, RedirectStandardOutput = true, Environment = { ["DISPLAY"] = Name, ["LC_ALL"] = "C.UTF-8" } };
+        foreach (var word in words)
+        {
+            start.ArgumentList.Add(word);
+        }
+
+        using var process = Process.Start(start)!;
+        using var output = new MemoryStream();
+        if (!process.StandardOutput.BaseStream.CopyToAsync(output).Wait(TimeSpan.FromSeconds(20)) || !process.WaitForExit(TimeSpan.FromSeconds(20)))
+        {
+            process.Kill();
+            Assert.Fail($"{program} {string.Join(' ', words)} did not end");
+        }
+
+        return (process.ExitCode, output.ToArray());
     }
 
     private static string? WhatIsMissing()

@@ -25,9 +25,9 @@ public sealed class WindowLoopTests(VirtualDisplay display)
         display.Require();
         using var window = new OpenedWindow(display);
         window.AwaitColours((5, 5, RecordingScreen.TopLeft));
-        display.Do("windowunmap", "--sync", window.Id);
+        display.Do("windowunmap", window.Id);
         window.AwaitColours((5, 5, SKColors.Black));
-        display.Do("windowmap", "--sync", window.Id);
+        display.Do("windowmap", window.Id);
         window.AwaitColours((5, 5, RecordingScreen.TopLeft), (999, 699, RecordingScreen.BottomRight));
     }
 
