@@ -37,6 +37,10 @@ internal sealed class ReplayPainter : IDisposable
         }
     }
 
+    /// <summary>How often the costly parts were made anew, for whoever tunes them.</summary>
+    public IEnumerable<string> Counts() =>
+        [$"ground {plans[0].Renewals}", $"labels {plans[0].Layouts}", $"timeline {timeline.Renewals}"];
+
     public void Dispose()
     {
         foreach (var plan in plans)
@@ -59,8 +63,8 @@ internal sealed class ReplayPainter : IDisposable
         right -= sheet.Width(clock, TextStyle.Title) + 20;
         var pace = (state.IsPlaying ? "playing " : "paused ") + PaceText(state.SpeedRatio) + (state.LoopToS is null ? "" : ", loop");
         sheet.Text(pace, right, baseline, TextStyle.Body, state.IsPlaying ? sheet.Colours.Ink : sheet.Colours.Quiet, SKTextAlign.Right);
-        right -= sheet.Width("playing 1/4 ×, loop", TextStyle.Body) + 16;
-        PaintPlaying(sheet, state.IsPlaying, new SKPoint(right, area.MidY));
+        PaintPlaying(sheet, state.IsPlaying, new SKPoint(right - sheet.Width(pace, TextStyle.Body) - 14, area.MidY));
+        right -= sheet.Width("playing 1/4 ×, loop", TextStyle.Body) + 24;
         var room = right - area.Left - 40;
         var name = string.Join("  |  ", world.Recordings.Select(recording => recording.Scene.ScenarioName).Distinct(StringComparer.Ordinal));
         sheet.Text(sheet.Fit(name, TextStyle.Title, room), area.Left + 16, baseline, TextStyle.Title, sheet.Colours.Ink);

@@ -7,7 +7,7 @@ namespace ScanSim.Display.Replay;
 /// One task at a time for each kind. Results are picked up by <see cref="Collect"/> on the caller's thread. A damaged table comes out there
 /// as the exception that reading threw.
 /// </remarks>
-internal sealed class ReplayReading(ImmutableArray<ReplayRecording> recordings) : IDisposable
+internal sealed class ReplayReading(ImmutableArray<ReplayRecording> recordings)
 {
     /// <summary>Read ahead of the time shown, at the least: half a minute at the highest speed would be more than some recordings hold in an hour.</summary>
     private const double AheadS = 300;
@@ -60,25 +60,8 @@ internal sealed class ReplayReading(ImmutableArray<ReplayRecording> recordings) 
         return isNew ? world with { Stretches = [.. known] } : null;
     }
 
-    public void Wait()
-    {
-        while (IsBusy)
-        {
-            foreach (var task in stretches)
-            {
-                task?.GetAwaiter().GetResult();
-            }
-
-            looks?.GetAwaiter().GetResult();
-            // The first looks may be followed by the rest.
-            Collect(new ReplayWorld { Recordings = recordings, Stretches = [], Rows = [] });
-        }
-    }
-
-    public void Dispose()
-    {
-        // Tasks only read; they end by themselves.
-    }
+    /// <summary>Waits for what is being read now; more may follow once it is collected.</summary>
+    public void Wait() => Task.WaitAll([.. stretches.OfType<Task>(), .. looks is null ? (Task[])[] : [looks]]);
 
     private void WantStretch(int index, ReplayState state)
     {

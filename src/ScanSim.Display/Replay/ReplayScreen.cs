@@ -80,18 +80,17 @@ public sealed class ReplayScreen : IScreen, IDisposable
         Paint(canvas, scale, forSvg: false, isCached: true);
     }
 
-    public void Dispose()
-    {
-        reading.Dispose();
-        painter.Dispose();
-    }
+    public void Dispose() => painter.Dispose();
 
     /// <summary>Waits until all that the present state shows has been read.</summary>
     internal void WaitForRows()
     {
         reading.Want(State, world);
-        reading.Wait();
-        Collect();
+        while (reading.IsBusy)
+        {
+            reading.Wait();
+            Collect();
+        }
     }
 
     private void Paint(SKCanvas canvas, float scale, bool forSvg, bool isCached)
