@@ -67,7 +67,12 @@ internal sealed class ReplayPainter : IDisposable
         right -= sheet.Width("playing 1/4 ×, loop", TextStyle.Body) + 24;
         var room = right - area.Left - 40;
         var name = string.Join("  |  ", world.Recordings.Select(recording => recording.Scene.ScenarioName).Distinct(StringComparer.Ordinal));
-        sheet.Text(sheet.Fit(name, TextStyle.Title, room), area.Left + 16, baseline, TextStyle.Title, sheet.Colours.Ink);
+        var after = sheet.Text(sheet.Fit(name, TextStyle.Title, room), area.Left + 16, baseline, TextStyle.Title, sheet.Colours.Ink);
+        var site = sheet.Fit(scene.SiteName, TextStyle.Body, Math.Max(0, right - after - 44));
+        if (site.Length > 2)
+        {
+            sheet.Text(site, after + 16, baseline, TextStyle.Body, sheet.Colours.Quiet);
+        }
     }
 
     private static string PaceText(double ratio) => ratio switch { 0.25 => "1/4 ×", 0.5 => "1/2 ×", _ => $"{ratio:0.##} ×" };

@@ -14,6 +14,8 @@ internal sealed class ReplayPlan : IDisposable
 
     private readonly Layer ground = new();
     private readonly LabelKeeper labels = new();
+    private (PlanFurniture Furniture, PlanGrid Grid)? kept;
+    private object? keptFor;
 
     public int Renewals => ground.Renewals;
 
@@ -26,9 +28,8 @@ internal sealed class ReplayPlan : IDisposable
         var projection = ReplayMoves.Projection(state, world, area);
         var view = ViewOf(state, world);
         var trailS = state is { ShowTrails: true, ShowTruth: true } ? TrailTimeS(scene, state.TimeS) : double.NaN;
-        var furniture = new PlanFurniture(sheet, projection, scene.SiteName, state.Unit, []);
-        var grid = new PlanGrid(sheet, projection, scene.InstrumentedRangeM, world.RangeM(state), state.Unit, furniture.Boxes, []);
-        var key = (state.CentreEastM, state.CentreNorthM, state.RangeM, state.UpRad, state.Unit, state.Theme, (state.ShowOverlays, index), trailS);
+        var (furniture, grid) = GridOf(sheet, state, world, scene, projection);
+        var key = (state.CentreEastM, state.CentreNorthM, state.RangeM, state.UpRad, state.Unit, state.Theme, state.ShowOverlays, trailS);
         ground.Show(frame, area, key, canvas => PaintGround(new Sheet(canvas, sheet.Colours, frame.ForSvg, null), area, projection, furniture, grid, scene, view, trailS, state.ShowOverlays ? world.Overlays : []));
 
         sheet.Canvas.Save();
@@ -54,6 +55,23 @@ internal sealed class ReplayPlan : IDisposable
     }
 
     public void Dispose() => ground.Dispose();
+
+    /// <summary>Rings and bearings with their labels. They stay where they are while the view does, though targets pass under the labels.</summary>
+    private (PlanFurniture Furniture, PlanGrid Grid) GridOf(Sheet sheet, ReplayState state, ReplayWorld world, Scene scene, PlanProjection projection)
+    {
+        var key = (projection.Area, state.CentreEastM, state.CentreNorthM, state.RangeM, state.UpRad, state.Unit, state.ShowTruth);
+        if (kept is not { } grids || !key.Equals(keptFor))
+        {
+            // The site's name stands in the title: beside the site there is the most traffic.
+            var furniture = new PlanFurniture(sheet, projection, "", state.Unit, []);
+            var targets = state.ShowTruth ? new PlanMarks(sheet, projection, scene, new ViewOptions(), state.TimeS).TargetsNow() : [];
+            grids = (furniture, new PlanGrid(
+                sheet, projection, scene.InstrumentedRangeM, world.RangeM(state), state.Unit, furniture.Boxes, [.. targets.Select(target => target.Position)]));
+            (kept, keptFor) = (grids, key);
+        }
+
+        return grids;
+    }
 
     private static ViewOptions ViewOf(ReplayState state, ReplayWorld world) => new()
     {
