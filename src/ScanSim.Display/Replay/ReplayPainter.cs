@@ -10,13 +10,10 @@ internal sealed class ReplayPainter : IDisposable
     private readonly ReplayPlan[] plans = [new ReplayPlan(), new ReplayPlan()];
     private readonly ReplayTimeline timeline = new();
 
-    /// <summary>Where each piece of text was set is added here, if given.</summary>
-    public ICollection<DrawnText>? Journal { get; set; }
-
     public void Paint(Frame frame, ReplayState state, ReplayWorld world, SelectedLooks looks)
     {
         var layout = ReplayLayout.Of(state.Width, state.Height, world);
-        using var sheet = new Sheet(frame.Canvas, Colours.Of(state.Theme), frame.ForSvg, Journal);
+        using var sheet = frame.SheetOn(frame.Canvas, Colours.Of(state.Theme));
         for (var i = 0; i < world.Recordings.Length; i++)
         {
             plans[i].Paint(frame, sheet, state, world, i, layout.Plans[i]);

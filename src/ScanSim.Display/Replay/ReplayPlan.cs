@@ -30,7 +30,7 @@ internal sealed class ReplayPlan : IDisposable
         var trailS = state is { ShowTrails: true, ShowTruth: true } ? TrailTimeS(scene, state.TimeS) : double.NaN;
         var (furniture, grid) = GridOf(sheet, state, world, scene, projection);
         var key = (state.CentreEastM, state.CentreNorthM, state.RangeM, state.UpRad, state.Unit, state.Theme, state.ShowOverlays, trailS);
-        ground.Show(frame, area, key, canvas => PaintGround(new Sheet(canvas, sheet.Colours, frame.ForSvg, null), area, projection, furniture, grid, scene, view, trailS, state.ShowOverlays ? world.Overlays : []));
+        ground.Show(frame, area, key, canvas => PaintGround(frame.SheetOn(canvas, sheet.Colours), area, projection, furniture, grid, scene, view, trailS, state.ShowOverlays ? world.Overlays : []));
 
         sheet.Canvas.Save();
         sheet.Canvas.ClipRect(area);

@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using ScanSim.Display.Painting;
 using ScanSim.Display.Windowing;
 using SkiaSharp;
 
@@ -54,6 +55,9 @@ public sealed class ReplayScreen : IScreen, IDisposable
 
     internal ReplayPainter Painter => painter;
 
+    /// <summary>Where each piece of text was set is added here, if given; then no layer is kept as pixels.</summary>
+    internal ICollection<DrawnText>? Journal { get; set; }
+
     public bool Handle(in WindowEvent e)
     {
         var before = State;
@@ -98,7 +102,7 @@ public sealed class ReplayScreen : IScreen, IDisposable
         var pixels = canvas.TotalMatrix;
         canvas.Save();
         canvas.Scale(scale);
-        painter.Paint(new Frame(canvas, pixels, scale, forSvg, isCached), State, world, reading.Selected);
+        painter.Paint(new Frame(canvas, pixels, scale, forSvg, isCached && Journal is null) { Journal = Journal }, State, world, reading.Selected);
         canvas.Restore();
     }
 
@@ -127,6 +131,11 @@ public sealed class ReplayScreen : IScreen, IDisposable
         }
 
         world = renewed;
+        if (reading.Fault is { } fault)
+        {
+            State = State with { Message = fault };
+        }
+
         return true;
     }
 

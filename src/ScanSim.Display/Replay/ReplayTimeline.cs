@@ -16,7 +16,7 @@ internal sealed class ReplayTimeline : IDisposable
         var key = (state.TimelineFromS, state.TimelineToS, state.FirstRow, state.Order, state.Theme, state.Selected ?? "", state.Width);
         layer.Show(frame, layout.Timeline, key, canvas =>
         {
-            using var own = new Sheet(canvas, sheet.Colours, frame.ForSvg, null);
+            using var own = frame.SheetOn(canvas, sheet.Colours);
             PaintStill(own, state, world, layout);
         });
         PaintLoop(sheet, state, layout);
