@@ -8,6 +8,9 @@ internal sealed class PlanGrid
     private const float BearingLabelPx = 14;
     private const float LeastRingGapPx = 34;
 
+    /// <summary>A target's ring, and a unit beside it.</summary>
+    private const float SymbolPx = 6.5f;
+
     /// <summary>From this radius on there is room for a label every 10 degrees.</summary>
     private const float DenseRadiusPx = 420;
 
@@ -18,13 +21,16 @@ internal sealed class PlanGrid
     private readonly PlanProjection plan;
     private readonly double instrumentedRangeM;
     private readonly IReadOnlyList<SKRect> taken;
+    private readonly IReadOnlyList<SKPoint> symbols;
     private readonly List<GridLabel> labels = [];
     private readonly List<double> ringsM = [];
 
     public PlanGrid(
-        Sheet sheet, PlanProjection plan, double instrumentedRangeM, double shownRangeM, RangeUnit unit, IReadOnlyList<SKRect> taken)
+        Sheet sheet, PlanProjection plan, double instrumentedRangeM, double shownRangeM, RangeUnit unit, IReadOnlyList<SKRect> taken,
+        IReadOnlyList<SKPoint> symbols)
     {
         this.taken = taken;
+        this.symbols = symbols;
         this.sheet = sheet;
         this.plan = plan;
         this.instrumentedRangeM = instrumentedRangeM;
@@ -95,9 +101,11 @@ internal sealed class PlanGrid
         var bearingsRad = RingLabelBearingsDeg.Select(b => b * (Math.PI / 180)).OrderByDescending(LabelledRings).ToList();
         foreach (var rangeM in ringsM)
         {
-            foreach (var bearingRad in bearingsRad)
+            // Beside the targets if that can be; under one rather than nowhere.
+            var text = RangeText.OfStep(rangeM, unit);
+            foreach (var bearingRad in bearingsRad.OrderBy(b => IsUnderSymbol(BoxAt(text, plan.Polar(rangeM, b))) ? 1 : 0))
             {
-                if (TryAdd(RangeText.OfStep(rangeM, unit), plan.Polar(rangeM, bearingRad)))
+                if (TryAdd(text, plan.Polar(rangeM, bearingRad)))
                 {
                     break;
                 }
@@ -105,6 +113,12 @@ internal sealed class PlanGrid
         }
 
         int LabelledRings(double bearingRad) => ringsM.Count(r => IsClear(BoxAt(RangeText.OfStep(r, unit), plan.Polar(r, bearingRad))));
+    }
+
+    private bool IsUnderSymbol(SKRect box)
+    {
+        var reach = SKRect.Inflate(box, SymbolPx, SymbolPx);
+        return symbols.Any(symbol => reach.Contains(symbol));
     }
 
     private void LayBearings()

@@ -17,7 +17,7 @@ internal static class PlanView
         var marks = new PlanMarks(sheet, plan, scene, view, timeS);
         var targets = view.ShowTruth ? marks.TargetsNow() : [];
         var furniture = new PlanFurniture(sheet, plan, scene.SiteName, view.Unit, targets);
-        var grid = new PlanGrid(sheet, plan, scene.InstrumentedRangeM, view.RangeM ?? scene.InstrumentedRangeM, view.Unit, [.. furniture.Boxes, CountBox(area)]);
+        var grid = new PlanGrid(sheet, plan, scene.InstrumentedRangeM, view.RangeM ?? scene.InstrumentedRangeM, view.Unit, [.. furniture.Boxes, CountBox(area)], [.. targets.Select(t => t.Position)]);
         marks.PaintBlanked();
         grid.PaintLines();
         if (view.ShowTruth)

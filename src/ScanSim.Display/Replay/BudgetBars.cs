@@ -84,6 +84,6 @@ internal sealed class BudgetBars(Sheet sheet, LookExplanation look)
 
     private static SKRect Bar(PanelColumn column, float left, float right) => new(left, column.Y - 9, right, column.Y);
 
-    /// <summary>With a real minus, and no "−0.0".</summary>
-    public static string Db(double db) => double.IsNegativeInfinity(db) ? "−∞ dB" : (Math.Round(db, 1) + 0.0).ToString("0.0").Replace('-', '−') + " dB";
+    /// <summary>With a dash for the minus (our letters lack the sign), and no "–0.0".</summary>
+    public static string Db(double db) => double.IsNegativeInfinity(db) ? "none" : (Math.Round(db, 1) + 0.0).ToString("0.0").Replace('-', '–') + " dB";
 }

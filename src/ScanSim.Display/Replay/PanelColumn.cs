@@ -15,6 +15,9 @@ internal sealed class PanelColumn(Sheet sheet, SKRect area)
     /// <summary>Reached so far.</summary>
     public float Y { get; set; } = area.Top + 6;
 
+    /// <summary>Height that is left.</summary>
+    public float Spare => area.Bottom - 4 - Y;
+
     public bool HasRoom(float height) => Y + height <= area.Bottom - 4;
 
     public void Heading(string text, string beside = "")

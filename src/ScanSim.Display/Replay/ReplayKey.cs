@@ -17,7 +17,7 @@ public sealed class ReplayKey
 
     public KeyGroup Group { get; }
 
-    /// <summary>As the help page writes it: "Shift+→".</summary>
+    /// <summary>As the help page writes it: "Shift+Right".</summary>
     public string Keys { get; }
 
     public string Does { get; }

@@ -17,7 +17,7 @@ internal sealed record ReplayLayout
     public const float StripHeight = 30;
     public const float AxisHeight = 24;
     public const float RowLabelWidth = 110;
-    public const float RatioWidth = 66;
+    public const float RatioWidth = 76;
 
     /// <summary>Of the height: the plan keeps the larger part.</summary>
     private const float TimelineShareMost = 0.36f;
@@ -44,7 +44,7 @@ internal sealed record ReplayLayout
 
     public static ReplayLayout Of(float width, float height, ReplayWorld world)
     {
-        var panelWidth = width >= 1200 ? 300f : 252f;
+        var panelWidth = width >= 1700 ? 360f : width >= 1200 ? 300f : 252f;
         const float rest = TimelineHeadHeight + StripHeight + AxisHeight;
         var fitting = Math.Clamp(world.Rows.Length, 2, Math.Max(2, (int)((TimelineShareMost * height - rest) / RowHeight)));
         var bottom = MathF.Floor(height) - FootHeight;

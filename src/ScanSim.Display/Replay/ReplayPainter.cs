@@ -10,13 +10,10 @@ internal sealed class ReplayPainter : IDisposable
     private readonly ReplayPlan[] plans = [new ReplayPlan(), new ReplayPlan()];
     private readonly ReplayTimeline timeline = new();
 
-    /// <summary>Where each piece of text was set is added here, if given.</summary>
-    public ICollection<DrawnText>? Journal { get; set; }
-
     public void Paint(Frame frame, ReplayState state, ReplayWorld world, SelectedLooks looks)
     {
         var layout = ReplayLayout.Of(state.Width, state.Height, world);
-        using var sheet = new Sheet(frame.Canvas, Colours.Of(state.Theme), frame.ForSvg, Journal);
+        using var sheet = frame.SheetOn(frame.Canvas, Colours.Of(state.Theme));
         for (var i = 0; i < world.Recordings.Length; i++)
         {
             plans[i].Paint(frame, sheet, state, world, i, layout.Plans[i]);
@@ -36,6 +33,10 @@ internal sealed class ReplayPainter : IDisposable
             HelpPage.Paint(sheet, state.Width, state.Height);
         }
     }
+
+    /// <summary>How often the costly parts were made anew, for whoever tunes them.</summary>
+    public IEnumerable<string> Counts() =>
+        [$"ground {plans[0].Renewals}", $"labels {plans[0].Layouts}", $"timeline {timeline.Renewals}"];
 
     public void Dispose()
     {
@@ -59,11 +60,16 @@ internal sealed class ReplayPainter : IDisposable
         right -= sheet.Width(clock, TextStyle.Title) + 20;
         var pace = (state.IsPlaying ? "playing " : "paused ") + PaceText(state.SpeedRatio) + (state.LoopToS is null ? "" : ", loop");
         sheet.Text(pace, right, baseline, TextStyle.Body, state.IsPlaying ? sheet.Colours.Ink : sheet.Colours.Quiet, SKTextAlign.Right);
-        right -= sheet.Width("playing 1/4 ×, loop", TextStyle.Body) + 16;
-        PaintPlaying(sheet, state.IsPlaying, new SKPoint(right, area.MidY));
+        PaintPlaying(sheet, state.IsPlaying, new SKPoint(right - sheet.Width(pace, TextStyle.Body) - 14, area.MidY));
+        right -= sheet.Width("playing 1/4 ×, loop", TextStyle.Body) + 24;
         var room = right - area.Left - 40;
         var name = string.Join("  |  ", world.Recordings.Select(recording => recording.Scene.ScenarioName).Distinct(StringComparer.Ordinal));
-        sheet.Text(sheet.Fit(name, TextStyle.Title, room), area.Left + 16, baseline, TextStyle.Title, sheet.Colours.Ink);
+        var after = sheet.Text(sheet.Fit(name, TextStyle.Title, room), area.Left + 16, baseline, TextStyle.Title, sheet.Colours.Ink);
+        var site = sheet.Fit(scene.SiteName, TextStyle.Body, Math.Max(0, right - after - 44));
+        if (site.Length > 2)
+        {
+            sheet.Text(site, after + 16, baseline, TextStyle.Body, sheet.Colours.Quiet);
+        }
     }
 
     private static string PaceText(double ratio) => ratio switch { 0.25 => "1/4 ×", 0.5 => "1/2 ×", _ => $"{ratio:0.##} ×" };

@@ -19,12 +19,12 @@ internal static class ReplayPanel
         sheet.Canvas.Save();
         sheet.Canvas.ClipRect(area);
         var column = new PanelColumn(sheet, area);
-        foreach (var recording in world.Recordings)
+        if (!world.IsComparison)
         {
-            PaintScan(column, state, world, recording);
+            PaintScan(column, state, world.First.Scene);
+            column.Rule();
         }
 
-        column.Rule();
         if (state.Selected is null)
         {
             PaintLegend(sheet, column, state, world);
@@ -37,22 +37,12 @@ internal static class ReplayPanel
         sheet.Canvas.Restore();
     }
 
-    private static void PaintScan(PanelColumn column, ReplayState state, ReplayWorld world, ReplayRecording recording)
+    private static void PaintScan(PanelColumn column, ReplayState state, Scene scene)
     {
-        var scene = recording.Scene;
         var index = SidePanel.ScanIndexAt(scene, state.TimeS);
-        if (world.IsComparison)
-        {
-            column.Heading(recording.Name);
-        }
-
         column.Figures("scan", index < 0 ? "none" : $"{scene.Scans[index].Scan} / {scene.Scans.Length}", "beam", $"{scene.Beam.AzimuthRad(state.TimeS) / Degree:000.0}°");
         column.Figures("period", $"{scene.Beam.PeriodS:0.0##} s", "width", $"{scene.BeamwidthRad / Degree:0.0#}°");
-        if (!world.IsComparison)
-        {
-            column.Figures("since start", $"{state.TimeS:0.0} s", "in view", InView(scene, state.TimeS));
-        }
-
+        column.Figures("since start", $"{state.TimeS:0.0} s", "in view", InView(scene, state.TimeS));
         column.Figure("last full scan", index < 1 ? "none" : $"{scene.Scans[index - 1].Plots} plots, {scene.Scans[index - 1].FalsePlots} false");
     }
 

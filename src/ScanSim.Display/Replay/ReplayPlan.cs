@@ -14,8 +14,12 @@ internal sealed class ReplayPlan : IDisposable
 
     private readonly Layer ground = new();
     private readonly LabelKeeper labels = new();
+    private (PlanFurniture Furniture, PlanGrid Grid)? kept;
+    private object? keptFor;
 
     public int Renewals => ground.Renewals;
+
+    public int Layouts => labels.Layouts;
 
     public void Paint(Frame frame, Sheet sheet, ReplayState state, ReplayWorld world, int index, SKRect area)
     {
@@ -24,10 +28,9 @@ internal sealed class ReplayPlan : IDisposable
         var projection = ReplayMoves.Projection(state, world, area);
         var view = ViewOf(state, world);
         var trailS = state is { ShowTrails: true, ShowTruth: true } ? TrailTimeS(scene, state.TimeS) : double.NaN;
-        var furniture = new PlanFurniture(sheet, projection, scene.SiteName, state.Unit, []);
-        var grid = new PlanGrid(sheet, projection, scene.InstrumentedRangeM, world.RangeM(state), state.Unit, furniture.Boxes);
-        var key = (state.CentreEastM, state.CentreNorthM, state.RangeM, state.UpRad, state.Unit, state.Theme, (state.ShowOverlays, index), trailS);
-        ground.Show(frame, area, key, canvas => PaintGround(new Sheet(canvas, sheet.Colours, frame.ForSvg, null), area, projection, furniture, grid, scene, view, trailS, state.ShowOverlays ? world.Overlays : []));
+        var (furniture, grid) = GridOf(sheet, state, world, scene, projection);
+        var key = (state.CentreEastM, state.CentreNorthM, state.RangeM, state.UpRad, state.Unit, state.Theme, state.ShowOverlays, trailS);
+        ground.Show(frame, area, key, canvas => PaintGround(frame.SheetOn(canvas, sheet.Colours), area, projection, furniture, grid, scene, view, trailS, state.ShowOverlays ? world.Overlays : []));
 
         sheet.Canvas.Save();
         sheet.Canvas.ClipRect(area);
@@ -47,11 +50,28 @@ internal sealed class ReplayPlan : IDisposable
             labels.Paint(sheet, area, targets, grid, furniture, plots, projection);
         }
 
-        PaintCaption(sheet, world, recording, area);
+        PaintCaption(sheet, world, recording, state.TimeS, area);
         sheet.Canvas.Restore();
     }
 
     public void Dispose() => ground.Dispose();
+
+    /// <summary>Rings and bearings with their labels. They stay where they are while the view does, though targets pass under the labels.</summary>
+    private (PlanFurniture Furniture, PlanGrid Grid) GridOf(Sheet sheet, ReplayState state, ReplayWorld world, Scene scene, PlanProjection projection)
+    {
+        var key = (projection.Area, state.CentreEastM, state.CentreNorthM, state.RangeM, state.UpRad, state.Unit, state.ShowTruth);
+        if (kept is not { } grids || !key.Equals(keptFor))
+        {
+            // The site's name stands in the title: beside the site there is the most traffic.
+            var furniture = new PlanFurniture(sheet, projection, "", state.Unit, []);
+            var targets = state.ShowTruth ? new PlanMarks(sheet, projection, scene, new ViewOptions(), state.TimeS).TargetsNow() : [];
+            grids = (furniture, new PlanGrid(
+                sheet, projection, scene.InstrumentedRangeM, world.RangeM(state), state.Unit, furniture.Boxes, [.. targets.Select(target => target.Position)]));
+            (kept, keptFor) = (grids, key);
+        }
+
+        return grids;
+    }
 
     private static ViewOptions ViewOf(ReplayState state, ReplayWorld world) => new()
     {
@@ -153,14 +173,16 @@ internal sealed class ReplayPlan : IDisposable
     }
 
     /// <summary>With two recordings side by side: which one this is.</summary>
-    private static void PaintCaption(Sheet sheet, ReplayWorld world, ReplayRecording recording, SKRect area)
+    private static void PaintCaption(Sheet sheet, ReplayWorld world, ReplayRecording recording, double timeS, SKRect area)
     {
         if (!world.IsComparison)
         {
             return;
         }
 
-        var text = sheet.Fit($"{recording.Name}, {recording.Scene.Beam.PeriodS:0.0##} s a scan", TextStyle.Strong, area.Width - 110);
+        var index = SidePanel.ScanIndexAt(recording.Scene, timeS);
+        var scan = index < 0 ? "" : $", scan {recording.Scene.Scans[index].Scan}";
+        var text = sheet.Fit($"{recording.Name}, {recording.Scene.Beam.PeriodS:0.0##} s a scan{scan}", TextStyle.Strong, area.Width - 110);
         var width = sheet.Width(text, TextStyle.Strong);
         sheet.Rect(new SKRect(area.Right - width - 20, area.Top + 8, area.Right - 8, area.Top + 28), sheet.Colours.Panel.WithAlpha(0xE0));
         sheet.Text(text, area.Right - 14, area.Top + 22, TextStyle.Strong, sheet.Colours.Ink, SKTextAlign.Right);

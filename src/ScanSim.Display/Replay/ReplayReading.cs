@@ -1,13 +1,14 @@
 using System.Collections.Immutable;
+using ScanSim.Recordings;
 
 namespace ScanSim.Display.Replay;
 
 /// <summary>Reads what is shown in the background: plots and hits around the time, and the selected target's looks.</summary>
 /// <remarks>
-/// One task at a time for each kind. Results are picked up by <see cref="Collect"/> on the caller's thread. A damaged table comes out there
-/// as the exception that reading threw.
+/// One task at a time for each kind. Results are picked up by <see cref="Collect"/> on the caller's thread. A damaged table leaves its part
+/// empty and says so in <see cref="Fault"/>.
 /// </remarks>
-internal sealed class ReplayReading(ImmutableArray<ReplayRecording> recordings) : IDisposable
+internal sealed class ReplayReading(ImmutableArray<ReplayRecording> recordings)
 {
     /// <summary>Read ahead of the time shown, at the least: half a minute at the highest speed would be more than some recordings hold in an hour.</summary>
     private const double AheadS = 300;
@@ -43,7 +44,8 @@ internal sealed class ReplayReading(ImmutableArray<ReplayRecording> recordings) 
             if (stretches[i] is { IsCompleted: true } task)
             {
                 stretches[i] = null;
-                known[i] = task.GetAwaiter().GetResult();
+                // What cannot be read now cannot be read later: nothing instead, once and for all.
+                known[i] = Result(task, new ReplayStretch(double.NegativeInfinity, double.PositiveInfinity, [], []));
                 isNew = true;
             }
         }
@@ -51,7 +53,7 @@ internal sealed class ReplayReading(ImmutableArray<ReplayRecording> recordings) 
         if (looks is { IsCompleted: true } read)
         {
             looks = null;
-            var found = read.GetAwaiter().GetResult();
+            var found = Result(read, SelectedLooks.Nothing with { Id = wantedId });
             Selected = string.Equals(found.Id, wantedId, StringComparison.Ordinal) ? found : Selected;
             isNew = true;
             WantLooks(world.Recordings);
@@ -60,24 +62,25 @@ internal sealed class ReplayReading(ImmutableArray<ReplayRecording> recordings) 
         return isNew ? world with { Stretches = [.. known] } : null;
     }
 
-    public void Wait()
+    /// <summary>What a damaged table said, for the user; null while all is well.</summary>
+    public string? Fault { get; private set; }
+
+    /// <summary>Waits for what is being read now; more may follow once it is collected.</summary>
+    public void Wait() =>
+        // Faults come out where results are collected.
+        Task.WhenAll([.. stretches.OfType<Task>(), .. looks is null ? (Task[])[] : [looks]]).ContinueWith(_ => { }, TaskScheduler.Default).Wait();
+
+    private T Result<T>(Task<T> task, T instead)
     {
-        while (IsBusy)
+        try
         {
-            foreach (var task in stretches)
-            {
-                task?.GetAwaiter().GetResult();
-            }
-
-            looks?.GetAwaiter().GetResult();
-            // The first looks may be followed by the rest.
-            Collect(new ReplayWorld { Recordings = recordings, Stretches = [], Rows = [] });
+            return task.GetAwaiter().GetResult();
         }
-    }
-
-    public void Dispose()
-    {
-        // Tasks only read; they end by themselves.
+        catch (RecordingException fault)
+        {
+            Fault = fault.Message;
+            return instead;
+        }
     }
 
     private void WantStretch(int index, ReplayState state)

@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using ScanSim.Display.Painting;
 using ScanSim.Display.Windowing;
 using SkiaSharp;
 
@@ -54,6 +55,9 @@ public sealed class ReplayScreen : IScreen, IDisposable
 
     internal ReplayPainter Painter => painter;
 
+    /// <summary>Where each piece of text was set is added here, if given; then no layer is kept as pixels.</summary>
+    internal ICollection<DrawnText>? Journal { get; set; }
+
     public bool Handle(in WindowEvent e)
     {
         var before = State;
@@ -80,18 +84,17 @@ public sealed class ReplayScreen : IScreen, IDisposable
         Paint(canvas, scale, forSvg: false, isCached: true);
     }
 
-    public void Dispose()
-    {
-        reading.Dispose();
-        painter.Dispose();
-    }
+    public void Dispose() => painter.Dispose();
 
     /// <summary>Waits until all that the present state shows has been read.</summary>
     internal void WaitForRows()
     {
         reading.Want(State, world);
-        reading.Wait();
-        Collect();
+        while (reading.IsBusy)
+        {
+            reading.Wait();
+            Collect();
+        }
     }
 
     private void Paint(SKCanvas canvas, float scale, bool forSvg, bool isCached)
@@ -99,7 +102,7 @@ public sealed class ReplayScreen : IScreen, IDisposable
         var pixels = canvas.TotalMatrix;
         canvas.Save();
         canvas.Scale(scale);
-        painter.Paint(new Frame(canvas, pixels, scale, forSvg, isCached), State, world, reading.Selected);
+        painter.Paint(new Frame(canvas, pixels, scale, forSvg, isCached && Journal is null) { Journal = Journal }, State, world, reading.Selected);
         canvas.Restore();
     }
 
@@ -128,6 +131,11 @@ public sealed class ReplayScreen : IScreen, IDisposable
         }
 
         world = renewed;
+        if (reading.Fault is { } fault)
+        {
+            State = State with { Message = fault };
+        }
+
         return true;
     }
 

@@ -16,7 +16,7 @@ internal sealed class ReplayTimeline : IDisposable
         var key = (state.TimelineFromS, state.TimelineToS, state.FirstRow, state.Order, state.Theme, state.Selected ?? "", state.Width);
         layer.Show(frame, layout.Timeline, key, canvas =>
         {
-            using var own = new Sheet(canvas, sheet.Colours, frame.ForSvg, null);
+            using var own = frame.SheetOn(canvas, sheet.Colours);
             PaintStill(own, state, world, layout);
         });
         PaintLoop(sheet, state, layout);
@@ -67,11 +67,12 @@ internal sealed class ReplayTimeline : IDisposable
 
     private static string Ratio(ReplayWorld world, ReplayRow row)
     {
-        var ratios = ((int Index, int Of)[])[(row.Left, 0), (row.Right, 1)];
-        return string.Join("/", ratios.Take(world.Recordings.Length).Select(entry =>
-            entry.Index >= 0 && world.Recordings[entry.Of].Scene.Targets[entry.Index].BlipScanRatio is var ratio && !double.IsNaN(ratio) ? $"{100 * ratio:0}" : "–"))
-            + (world.IsComparison ? "" : " %");
+        var left = Percent(world.Recordings[0], row.Left);
+        return world.IsComparison ? $"{left}/{Percent(world.Recordings[1], row.Right)}" : left + (left.Length > 0 && left[0] != '–' ? " %" : "");
     }
+
+    private static string Percent(ReplayRecording recording, int target) =>
+        target >= 0 && recording.Scene.Targets[target].BlipScanRatio is var ratio && !double.IsNaN(ratio) ? $"{100 * ratio:0}" : "–";
 
     private RowMarks MarksOf(ReplayWorld world, ReplayRow row)
     {
@@ -103,7 +104,6 @@ internal sealed class ReplayTimeline : IDisposable
         var unit = track.Height / world.Rows.Length;
         var top = track.Top + state.FirstRow * unit;
         sheet.Rect(new SKRect(track.Left, top, track.Right, Math.Max(top + 6, top + layout.RowsFitting * unit)), sheet.Colours.Trail);
-        sheet.Text($"rows {state.FirstRow + 1}–{state.FirstRow + layout.RowsFitting} of {world.Rows.Length}", layout.Timeline.Left + 16, layout.Rows.Bottom + 16, TextStyle.Small, sheet.Colours.Quiet);
     }
 
     private static float X(ReplayState state, SKRect rows, double timeS) =>

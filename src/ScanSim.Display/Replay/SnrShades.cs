@@ -34,5 +34,5 @@ internal sealed record SnrShades(float LowDb, float MiddleDb, float HighDb)
     /// <summary>0 for the weakest quarter to 3 for the strongest; 3 where no ratio was recorded.</summary>
     public int Of(float snrDb) => snrDb < LowDb ? 0 : snrDb < MiddleDb ? 1 : snrDb < HighDb ? 2 : 3;
 
-    public static byte Alpha(int shade) => (byte)(255 * (0.4 + 0.2 * shade));
+    public static byte Alpha(int shade) => (byte)(255 * (0.52 + 0.16 * shade));
 }

@@ -79,16 +79,20 @@ internal sealed class TargetLookPanel(
 
     private void PaintCharts(LookExplanation? explained)
     {
+        var spare = column.Spare - (isBrief ? 24 : 46);
+        // Two recordings: the second one's lines come below.
+        var snrHeight = isBrief ? SnrHeight : Math.Clamp(0.6f * spare, SnrHeight, 3 * SnrHeight);
+        var pdHeight = Math.Clamp(0.4f * spare, PdHeight, 3 * PdHeight);
         if (column.HasRoom(SnrHeight + 20))
         {
             Caption("SNR, dB", explained is null ? "" : "line: needed for even odds");
-            new LookChart(sheet, recording.Scene, state.TimeS, column.Box(SnrHeight)).PaintSnr(target.Looks, explained?.NeededDb);
+            new LookChart(sheet, recording.Scene, state.TimeS, column.Box(snrHeight)).PaintSnr(target.Looks, explained?.NeededDb);
         }
 
         if (!isBrief && column.HasRoom(PdHeight + 20))
         {
             Caption("Pd", looks.IsWhole ? "" : "reading …");
-            new LookChart(sheet, recording.Scene, state.TimeS, column.Box(PdHeight)).PaintPd(looks.Looks[index]);
+            new LookChart(sheet, recording.Scene, state.TimeS, column.Box(pdHeight)).PaintPd(looks.Looks[index]);
         }
     }
 

@@ -13,7 +13,8 @@ internal sealed class TimelineHeading(Sheet sheet, ReplayState state, ReplayWorl
         var area = layout.Timeline;
         sheet.Text("Scan timeline", area.Left + 16, area.Top + 17, TextStyle.Strong, sheet.Colours.Ink);
         var order = TimelineHeadBox.Order(layout);
-        sheet.Text($"rows by {OrderText(state.Order)}", order.Right, area.Top + 17, TextStyle.Small, sheet.Colours.Ink, SKTextAlign.Right);
+        var part = world.Rows.Length > layout.RowsFitting ? $" {state.FirstRow + 1}–{state.FirstRow + layout.RowsFitting} of {world.Rows.Length}" : "";
+        sheet.Text($"rows{part} by {OrderText(state.Order)}", order.Right, area.Top + 17, TextStyle.Small, sheet.Colours.Ink, SKTextAlign.Right);
         sheet.Text(world.IsComparison ? "blip/scan %" : "blip/scan", area.Right - 14, layout.Rows.Top - 4, TextStyle.Small, sheet.Colours.Quiet, SKTextAlign.Right);
         var x = area.Left + 16 + sheet.Width("Scan timeline", TextStyle.Strong) + 24;
         var inColumns = RowPainter.IsInColumns(layout.Rows.Width, state.TimelineToS - state.TimelineFromS, world.Recordings.Max(r => r.Scene.Beam.PeriodS));
