@@ -23,15 +23,13 @@ internal static class ViewCommand
         var folder = new Argument<string>("FOLDER") { Description = "Folder of the recording." };
         var other = new Argument<string?>("FOLDER2") { Description = "A second recording, shown beside it in step.", Arity = ArgumentArity.ZeroOrOne };
         var at = QuantityOption.Create("--at", Dimension.Time, "TIME", "Time to begin at, since the scenario's start [default: 0 s].", 0);
-        var speed = new Option<double>("--speed") { Description = "Times as fast as it was, from 0.25 to 64.", HelpName = "FACTOR", DefaultValueFactory = _ => 1 };
-        speed.Validators.Add(RefuseSpeed);
+        var speed = Factor("--speed", "Times as fast as it was, from 0.25 to 64 [default: 1].", SlowestRatio, FastestRatio);
         var target = new Option<string?>("--target") { Description = "Target selected at first.", HelpName = "ID" };
         var unit = ChoiceOption.Create("--unit", "Unit of ranges.", ("km", RangeUnit.Kilometre), ("nmi", RangeUnit.NauticalMile));
         var paper = new Option<bool>("--paper") { Description = "Dark on white." };
         var overlays = new Option<string[]>("--overlay") { Description = "Lines and places to draw under the plan, as GeoJSON; may be given again.", HelpName = "FILE.geojson", DefaultValueFactory = _ => [] };
         var size = new Option<(int Width, int Height)>("--size") { Description = "Size of the window in pixels at scale 1 [default: 1280x800].", HelpName = "WxH", CustomParser = ParseSize, DefaultValueFactory = _ => Usual };
-        var scale = new Option<float?>("--scale") { Description = "Draws everything so many times as large, from 1 to 8 [default: as the screen asks].", HelpName = "FACTOR" };
-        scale.Validators.Add(RefuseScale);
+        var scale = Factor("--scale", "Draws everything so many times as large, from 1 to 8 [default: as the screen asks].", 1, 8);
         var measure = QuantityOption.Create("--measure", Dimension.Time, "TIME", "Plays for so long, prints how long the frames took, and closes.", 0, above: true);
         var command = new Command("view", "Replay a recording in a window, or two side by side. The key ? lists what keys and mouse do.")
         {
@@ -44,7 +42,7 @@ internal static class ViewCommand
             var settings = new ReplaySettings
             {
                 StartS = parsed.GetValue(at) ?? 0,
-                SpeedRatio = parsed.GetValue(speed),
+                SpeedRatio = parsed.GetValue(speed) ?? 1,
                 Unit = parsed.GetValue(unit),
                 Theme = parsed.GetValue(paper) ? Theme.Paper : Theme.Dark,
                 Selected = parsed.GetValue(target),
@@ -77,11 +75,11 @@ internal static class ViewCommand
         }
     }
 
-    private static void Show(ReplayRecording[] recordings, ReplaySettings settings, (int Width, int Height) size, float? scale, double? measureS, CancellationToken cancellation)
+    private static void Show(ReplayRecording[] recordings, ReplaySettings settings, (int Width, int Height) size, double? scale, double? measureS, CancellationToken cancellation)
     {
         var measurement = measureS is { } lengthS ? new FrameMeasurement(lengthS, () => Environment.CpuUsage.TotalTime.TotalSeconds) : null;
         using var screen = new ReplayScreen([.. recordings], settings);
-        using var window = SdlWindow.Open(screen.Title, size.Width, size.Height, scale);
+        using var window = SdlWindow.Open(screen.Title, size.Width, size.Height, (float?)scale);
         new WindowLoop(window, screen, () => Stopwatch.GetTimestamp() / (double)Stopwatch.Frequency).Run(measurement, cancellation);
         cancellation.ThrowIfCancellationRequested();
         if (measurement is { IsComplete: true })
@@ -99,21 +97,22 @@ internal static class ViewCommand
         Console.Out.WriteLine($"processor {measured.ProcessorRatio * 100:0} % of one core");
     }
 
-    private static void RefuseSpeed(OptionResult result)
+    private static Option<double?> Factor(string name, string description, double least, double most) => new(name)
     {
-        if (result.Errors.Any() || !(result.GetValueOrDefault<double>() is >= SlowestRatio and <= FastestRatio))
+        Description = description,
+        HelpName = "FACTOR",
+        CustomParser = result =>
         {
-            result.AddError($"--speed: read \"{string.Concat(result.Tokens)}\", expected a number from {SlowestRatio} to {FastestRatio}");
-        }
-    }
+            var text = result.Tokens[0].Value;
+            if (double.TryParse(text, NumberStyles.Float, CultureInfo.InvariantCulture, out var factor) && factor >= least && factor <= most)
+            {
+                return factor;
+            }
 
-    private static void RefuseScale(OptionResult result)
-    {
-        if (result.Errors.Any() || !(result.GetValueOrDefault<float?>() is >= 1 and <= 8))
-        {
-            result.AddError($"--scale: read \"{string.Concat(result.Tokens)}\", expected a number from 1 to 8");
-        }
-    }
+            result.AddError($"{name}: read \"{text}\", expected a number from {least} to {most}");
+            return null;
+        },
+    };
 
     private static (int Width, int Height) ParseSize(ArgumentResult result)
     {

@@ -50,7 +50,7 @@ public sealed class ViewCommandTests : IDisposable
 
     /// <summary>On Linux; elsewhere there is always a display.</summary>
     [Fact]
-    public void Without_a_display_one_line_says_so_and_what_needs_none()
+    public async Task Without_a_display_one_line_says_so_and_what_needs_none()
     {
         Assert.SkipUnless(OperatingSystem.IsLinux(), "only Linux runs without a display");
         ScanSimProcess.Run("run", ScanSimProcess.Harbour, "-o", folder.Of("out"), "--duration", "10 s").AssertDone();
@@ -66,10 +66,10 @@ public sealed class ViewCommandTests : IDisposable
         }
 
         using var process = Process.Start(start)!;
-        var error = process.StandardError.ReadToEndAsync();
-        var output = process.StandardOutput.ReadToEnd();
-        Assert.True(process.WaitForExit(TimeSpan.FromMinutes(1)), "scansim did not end");
-        var outcome = new Outcome(process.ExitCode, output, error.Result);
+        var error = process.StandardError.ReadToEndAsync(TestContext.Current.CancellationToken);
+        var output = await process.StandardOutput.ReadToEndAsync(TestContext.Current.CancellationToken);
+        await process.WaitForExitAsync(TestContext.Current.CancellationToken);
+        var outcome = new Outcome(process.ExitCode, output, await error);
 
         // Where SDL2 is missing as well, that is what is said.
         outcome.AssertRefused("scansim picture");

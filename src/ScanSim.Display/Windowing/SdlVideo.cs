@@ -5,6 +5,8 @@ internal sealed class SdlVideo : IDisposable
 {
     private const string NoDisplayNeeded = "'scansim picture' needs no window";
 
+    private const string NoDisplay = $"There is no display to open a window on (DISPLAY or WAYLAND_DISPLAY is not set or does not answer); {NoDisplayNeeded}.";
+
     private SdlVideo(SdlVersion version, string driver)
     {
         Version = version;
@@ -22,6 +24,12 @@ internal sealed class SdlVideo : IDisposable
         try
         {
             Sdl.GetVersion(out var version);
+            if (OperatingSystem.IsLinux() && string.IsNullOrEmpty(chosenDriver) && !IsNamed("DISPLAY") && !IsNamed("WAYLAND_DISPLAY"))
+            {
+                // Without asking SDL: the libraries of the systems it tries write to stderr.
+                throw new WindowException(NoDisplay);
+            }
+
             CharacterLocale.UseUtf8();
             SetHints();
             if (Sdl.InitSubSystem(Sdl.InitVideo) != 0)
@@ -44,6 +52,8 @@ internal sealed class SdlVideo : IDisposable
     }
 
     public void Dispose() => Sdl.QuitSubSystem(Sdl.InitVideo);
+
+    private static bool IsNamed(string variable) => !string.IsNullOrEmpty(Environment.GetEnvironmentVariable(variable));
 
     private static void SetHints()
     {
@@ -75,7 +85,7 @@ internal sealed class SdlVideo : IDisposable
         if (Driver is "offscreen" or "dummy" or "evdev" && !string.Equals(Driver, chosenDriver, StringComparison.OrdinalIgnoreCase))
         {
             Dispose();
-            throw new WindowException($"There is no display to open a window on (DISPLAY or WAYLAND_DISPLAY is not set or does not answer); {NoDisplayNeeded}.");
+            throw new WindowException(NoDisplay);
         }
     }
 }

@@ -37,6 +37,7 @@ public sealed class VirtualDisplay : IDisposable
         // SDL reads the environment of the process, which .NET's variables do not reach on Unix.
         SetNativeVariable("DISPLAY", Name);
         SetNativeVariable("SDL_VIDEODRIVER", "x11");
+        Environment.SetEnvironmentVariable("SDL_VIDEODRIVER", "x11");
     }
 
     public string Name { get; } = "";
