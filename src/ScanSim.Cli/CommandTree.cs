@@ -18,6 +18,7 @@ internal static class CommandTree
         Add(root, examples, SchemaCommand.Create());
         Add(root, examples, BudgetCommand.Create());
         Add(root, examples, PictureCommand.Create());
+        Add(root, examples, ViewCommand.Create(interruption));
         Add(root, examples, ExplainCommand.Create());
         Add(root, examples, FilmCommand.Create(interruption));
         Add(root, examples, DoctorCommand.Create());

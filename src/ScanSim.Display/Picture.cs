@@ -8,7 +8,11 @@ namespace ScanSim.Display;
 public static class Picture
 {
     /// <summary>Writes beside the file and renames, so that a broken picture never stands under the name asked for.</summary>
-    public static void Save(Scene scene, ViewOptions view, double timeS, PictureSize size, string path)
+    public static void Save(Scene scene, ViewOptions view, double timeS, PictureSize size, string path) =>
+        Write(path, size, scene, (canvas, forSvg) => new Painter(scene) { ForSvg = forSvg }.Paint(canvas, size, view, timeS));
+
+    /// <summary>The same for anything that can be painted onto a canvas in pixels, told whether it becomes SVG; name and date come from the scene.</summary>
+    internal static void Write(string path, PictureSize size, Scene scene, Action<SKCanvas, bool> paint)
     {
         var draw = FormatOf(path);
         size.Check();
@@ -17,7 +21,7 @@ public static class Picture
         {
             using (var stream = File.Create(unfinished))
             {
-                draw(scene, view, timeS, size, stream);
+                draw(scene, size, stream, paint);
             }
 
             File.Move(unfinished, path, overwrite: true);
@@ -34,7 +38,7 @@ public static class Picture
         }
     }
 
-    private static Action<Scene, ViewOptions, double, PictureSize, Stream> FormatOf(string path) =>
+    private static Action<Scene, PictureSize, Stream, Action<SKCanvas, bool>> FormatOf(string path) =>
         Path.GetExtension(path).ToUpperInvariant() switch
         {
             ".PNG" => Png,
@@ -44,11 +48,11 @@ public static class Picture
                 $"Picture '{path}' has {(other.Length == 0 ? "no ending" : $"the ending '{Path.GetExtension(path)}'")}: it must end in .png, .svg or .pdf."),
         };
 
-    private static void Png(Scene scene, ViewOptions view, double timeS, PictureSize size, Stream into)
+    private static void Png(Scene scene, PictureSize size, Stream into, Action<SKCanvas, bool> paint)
     {
         using var surface = SKSurface.Create(new SKImageInfo(size.WidthPx, size.HeightPx, SKColorType.Rgba8888, SKAlphaType.Premul))
             ?? throw new PictureException($"There is no memory for a picture of {size.WidthPx} x {size.HeightPx} pixels.");
-        new Painter(scene).Paint(surface.Canvas, size, view, timeS);
+        paint(surface.Canvas, false);
         using var image = surface.Snapshot();
         using var pixels = image.PeekPixels();
         // No filter and medium compression: the quickest of the small ones for flat colours.
@@ -57,19 +61,19 @@ public static class Picture
         data.SaveTo(into);
     }
 
-    private static void Svg(Scene scene, ViewOptions view, double timeS, PictureSize size, Stream into)
+    private static void Svg(Scene scene, PictureSize size, Stream into, Action<SKCanvas, bool> paint)
     {
         using var drawn = new MemoryStream();
         using (var canvas = SKSvgCanvas.Create(SKRect.Create(size.WidthPx, size.HeightPx), drawn))
         {
-            new Painter(scene) { ForSvg = true }.Paint(canvas, size, view, timeS);
+            paint(canvas, true);
         }
 
         var svg = SvgEnvelope.Finish(Encoding.UTF8.GetString(drawn.ToArray()), scene.ScenarioName, size);
         into.Write(Encoding.UTF8.GetBytes(svg));
     }
 
-    private static void Pdf(Scene scene, ViewOptions view, double timeS, PictureSize size, Stream into)
+    private static void Pdf(Scene scene, PictureSize size, Stream into, Action<SKCanvas, bool> paint)
     {
         // The date of what is shown, not of the making: the bytes must not depend on the clock.
         var date = scene.StartUtc.UtcDateTime;
@@ -85,7 +89,7 @@ public static class Picture
         };
         using var document = SKDocument.CreatePdf(into, metadata);
         var canvas = document.BeginPage(size.WidthPx, size.HeightPx);
-        new Painter(scene).Paint(canvas, size, view, timeS);
+        paint(canvas, false);
         document.EndPage();
         document.Close();
     }

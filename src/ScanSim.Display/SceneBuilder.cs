@@ -39,10 +39,9 @@ public sealed class SceneBuilder : IRecordingSink
 
     public void AddLooks(ReadOnlySpan<LookRow> rows)
     {
-        anyLooks |= rows.Length > 0;
         foreach (ref readonly var row in rows)
         {
-            Of(row.Target, "looks").Add(row);
+            Add(LookSummary.Of(row));
         }
     }
 
@@ -57,17 +56,10 @@ public sealed class SceneBuilder : IRecordingSink
         {
             if (row.TimeS >= PlotsFromS && row.TimeS <= PlotsToS)
             {
-                var (sin, cos) = Math.SinCos(row.AzimuthDeg * (Math.PI / 180));
-                plots.Add(new PlotMark(row.TimeS, row.Scan, (float)(row.RangeM * sin), (float)(row.RangeM * cos), row.Kind));
+                plots.Add(MarkOf(row));
             }
 
-            if (row.Kind == EchoKind.Target)
-            {
-                foreach (var id in row.Target.Split('+'))
-                {
-                    Of(id, "plots").AddPlot(row.TimeS);
-                }
-            }
+            Add(PlotSummary.Of(row));
         }
     }
 
@@ -75,9 +67,38 @@ public sealed class SceneBuilder : IRecordingSink
     {
         foreach (ref readonly var row in rows)
         {
-            Of(row.Target, "truth").Add(row);
+            Add(TruthSummary.Of(row));
         }
     }
+
+    /// <summary>A look in short. Looks, plots and truth may be added by one thread each at the same time.</summary>
+    internal void Add(in LookSummary row)
+    {
+        anyLooks = true;
+        Of(row.Target, "looks").Add(row);
+    }
+
+    /// <summary>A plot that counts in the timeline only.</summary>
+    internal void Add(in PlotSummary row)
+    {
+        if (row.Kind != EchoKind.Target)
+        {
+            return;
+        }
+
+        if (!row.Target.Contains('+', StringComparison.Ordinal))
+        {
+            Of(row.Target, "plots").AddPlot(row.TimeS);
+            return;
+        }
+
+        foreach (var id in row.Target.Split('+'))
+        {
+            Of(id, "plots").AddPlot(row.TimeS);
+        }
+    }
+
+    internal void Add(in TruthSummary row) => Of(row.Target, "truth").Add(row);
 
     public Scene Build()
     {
@@ -96,6 +117,18 @@ public sealed class SceneBuilder : IRecordingSink
             Targets = [.. scenario.Targets.Select(t => gatherings[t.Id].Build(anyLooks))],
             Scans = [.. scans],
             Plots = [.. plots],
+        };
+    }
+
+    /// <summary>A plot's place on the plan.</summary>
+    internal static PlotMark MarkOf(in PlotRow row)
+    {
+        var (sin, cos) = Math.SinCos(row.AzimuthDeg * (Math.PI / 180));
+        return new PlotMark(row.TimeS, row.Scan, (float)(row.RangeM * sin), (float)(row.RangeM * cos), row.Kind)
+        {
+            SnrDb = (float)row.SnrDb,
+            Hits = row.Hits,
+            Target = row.Target,
         };
     }
 

@@ -15,29 +15,50 @@ public static class SceneReader
     public static Scene Load(Recording recording, double plotsFromS = double.NegativeInfinity, double plotsToS = double.PositiveInfinity) =>
         Load(recording, ScenarioFile.Parse(recording.ScenarioText, "scenario.json of the recording"), plotsFromS, plotsToS);
 
-    /// <summary>The same with a scenario that was read before.</summary>
-    public static Scene Load(Recording recording, Scenario scenario, double plotsFromS, double plotsToS)
+    /// <summary>The whole timeline and no plot.</summary>
+    internal static Scene LoadWithoutPlots(Recording recording, Scenario scenario) => Load(recording, new SceneBuilder(scenario), builder =>
     {
-        var builder = new SceneBuilder(scenario) { PlotsFromS = plotsFromS, PlotsToS = plotsToS };
+        foreach (var row in recording.PlotSummaries())
+        {
+            builder.Add(row);
+        }
+    });
+
+    /// <summary>The same with a scenario that was read before.</summary>
+    public static Scene Load(Recording recording, Scenario scenario, double plotsFromS, double plotsToS) =>
+        Load(recording, new SceneBuilder(scenario) { PlotsFromS = plotsFromS, PlotsToS = plotsToS }, builder =>
+        {
+            foreach (var row in recording.Plots())
+            {
+                builder.AddPlots(new ReadOnlySpan<PlotRow>(in row));
+            }
+        });
+
+    private static Scene Load(Recording recording, SceneBuilder builder, Action<SceneBuilder> addPlots)
+    {
         foreach (var row in recording.Scans())
         {
             builder.AddScan(row);
         }
 
-        foreach (var row in recording.Looks())
+        // Reading is mostly decoding: a core for each of the two large tables.
+        var looks = Task.Run(() =>
         {
-            builder.AddLooks(new ReadOnlySpan<LookRow>(in row));
-        }
-
-        foreach (var row in recording.Plots())
+            foreach (var row in recording.LookSummaries())
+            {
+                builder.Add(row);
+            }
+        });
+        var truth = Task.Run(() =>
         {
-            builder.AddPlots(new ReadOnlySpan<PlotRow>(in row));
-        }
-
-        foreach (var row in recording.Truth())
-        {
-            builder.AddTruth(new ReadOnlySpan<TruthRow>(in row));
-        }
+            foreach (var row in recording.TruthSummaries())
+            {
+                builder.Add(row);
+            }
+        });
+        addPlots(builder);
+        looks.GetAwaiter().GetResult();
+        truth.GetAwaiter().GetResult();
 
         // A run may have been made shorter or with another start than its scenario says.
         return builder.Build() with { StartUtc = recording.Head.StartUtc, DurationS = recording.Head.DurationS };

@@ -10,23 +10,31 @@ namespace ScanSim.Display;
 internal sealed class TargetGathering(Target target, double reachS)
 {
     private readonly List<TruthMark> truth = [];
-    private readonly Dictionary<int, LookMark> looks = [];
+    private readonly List<LookMark> looks = [];
     private readonly List<double> plotTimesS = [];
 
-    public void Add(in TruthRow row)
+    public void Add(in TruthSummary row)
     {
         var (sin, cos) = Math.SinCos(row.AzimuthDeg * (Math.PI / 180));
         truth.Add(new TruthMark(
-            row.TimeS, row.Scan, (float)(row.RangeM * sin), (float)(row.RangeM * cos), (float)row.EastMps, (float)row.NorthMps, row.View));
+            row.TimeS, row.Scan, (float)(row.RangeM * sin), (float)(row.RangeM * cos), (float)row.EastMps, (float)row.NorthMps, row.View)
+        {
+            HeightM = (float)row.HeightM,
+        });
     }
 
     /// <summary>Keeps one look a scan: the strongest detected one, or the strongest if none was detected.</summary>
-    public void Add(in LookRow row)
+    public void Add(in LookSummary row)
     {
         var mark = new LookMark(row.TimeS, row.Scan, (float)row.SnrDb, OutcomeOf(row));
-        if (!looks.TryGetValue(mark.Scan, out var known) || IsBetter(mark, known))
+        var index = IndexOfScan(mark.Scan);
+        if (index < 0)
         {
-            looks[mark.Scan] = mark;
+            looks.Insert(~index, mark);
+        }
+        else if (IsBetter(mark, looks[index]))
+        {
+            looks[index] = mark;
         }
     }
 
@@ -35,15 +43,20 @@ internal sealed class TargetGathering(Target target, double reachS)
     public SceneTarget Build(bool recordingHasLooks)
     {
         plotTimesS.Sort();
-        var looksWithoutTruth = new HashSet<int>(looks.Keys);
+        var hasTruth = new bool[looks.Count];
         var marks = ImmutableArray.CreateBuilder<LookMark>(truth.Count);
         var inView = 0;
         var withPlot = 0;
         foreach (var t in truth)
         {
-            var looked = looks.TryGetValue(t.Scan, out var look);
-            looksWithoutTruth.Remove(t.Scan);
-            marks.Add(looked ? look : new LookMark(t.TimeS, t.Scan, float.NaN, WithoutLook(t, recordingHasLooks)));
+            var index = IndexOfScan(t.Scan);
+            var looked = index >= 0;
+            if (looked)
+            {
+                hasTruth[index] = true;
+            }
+
+            marks.Add(looked ? looks[index] : new LookMark(t.TimeS, t.Scan, float.NaN, WithoutLook(t, recordingHasLooks)));
             if (t.View == TargetView.InView || looked)
             {
                 inView++;
@@ -52,7 +65,7 @@ internal sealed class TargetGathering(Target target, double reachS)
         }
 
         // A look in a scan whose truth row lies beyond the track's end, for instance.
-        marks.AddRange(looksWithoutTruth.Select(scan => looks[scan]));
+        marks.AddRange(looks.Where((_, i) => !hasTruth[i]));
         marks.Sort(static (a, b) => a.TimeS.CompareTo(b.TimeS));
         return new SceneTarget
         {
@@ -63,6 +76,35 @@ internal sealed class TargetGathering(Target target, double reachS)
             ScansInView = inView,
             ScansWithPlot = withPlot,
         };
+    }
+
+    /// <summary>Place of a scan's look among the looks, which are in order of scans; the complement of where it would stand if there is none.</summary>
+    private int IndexOfScan(int scan)
+    {
+        // Rows come in order of time: it is the last look or a later one.
+        if (looks.Count == 0 || looks[^1].Scan < scan)
+        {
+            return ~looks.Count;
+        }
+
+        var (low, high) = (0, looks.Count - 1);
+        if (looks[high].Scan == scan)
+        {
+            return high;
+        }
+
+        while (low <= high)
+        {
+            var middle = (low + high) >> 1;
+            if (looks[middle].Scan == scan)
+            {
+                return middle;
+            }
+
+            (low, high) = looks[middle].Scan < scan ? (middle + 1, high) : (low, middle - 1);
+        }
+
+        return ~low;
     }
 
     private bool HasPlot(double passS)
@@ -88,7 +130,7 @@ internal sealed class TargetGathering(Target target, double reachS)
         return isDetected == wasDetected ? mark.SnrDb > known.SnrDb : isDetected;
     }
 
-    private static LookOutcome OutcomeOf(in LookRow row) => (row.Detected, row.LostTo) switch
+    private static LookOutcome OutcomeOf(in LookSummary row) => (row.Detected, row.LostTo) switch
     {
         (true, _) => LookOutcome.Detected,
         (_, LossReason.AzimuthBeam or LossReason.ElevationBeam) => LookOutcome.MissedBeam,

@@ -9,7 +9,7 @@ namespace ScanSim.Recordings;
 /// Rows are read while they are enumerated, in the order of the file, block by block. Enumerations are independent of each other. A table
 /// is compared with the row count of the manifest when it is read to its end without a time span.
 /// </remarks>
-public sealed class Recording
+public sealed partial class Recording
 {
     private readonly RecordingFolder folder;
 

@@ -19,8 +19,8 @@ internal static class Glyphs
         into.Close();
     }
 
-    /// <summary>A ring with a stroke along the course (east, north); four arcs and no stroke when the radar cannot look at the target.</summary>
-    public static void Truth(SKPath into, SKPoint centre, float eastMps, float northMps, bool inView, float scale = 1)
+    /// <summary>A ring with a stroke along the course (right, up); four arcs and no stroke when the radar cannot look at the target.</summary>
+    public static void Truth(SKPath into, SKPoint centre, float rightMps, float upMps, bool inView, float scale = 1)
     {
         var r = TruthRadius * scale;
         if (!inView)
@@ -35,10 +35,10 @@ internal static class Glyphs
         }
 
         into.AddCircle(centre.X, centre.Y, r);
-        var speed = MathF.Sqrt(eastMps * eastMps + northMps * northMps);
+        var speed = MathF.Sqrt(rightMps * rightMps + upMps * upMps);
         if (speed > 0)
         {
-            var (ux, uy) = (eastMps / speed, -northMps / speed);
+            var (ux, uy) = (rightMps / speed, -upMps / speed);
             into.MoveTo(centre.X + ux * r, centre.Y + uy * r);
             into.LineTo(centre.X + ux * (r + 7 * scale), centre.Y + uy * (r + 7 * scale));
         }
@@ -48,9 +48,9 @@ internal static class Glyphs
     public static void Outcome(Sheet sheet, LookOutcome outcome, SKPoint centre, float r) => Outcomes(sheet, outcome, [centre], r);
 
     /// <summary>The same mark at many places, drawn in one go.</summary>
-    public static void Outcomes(Sheet sheet, LookOutcome outcome, SKPoint[] centres, float r)
+    public static void Outcomes(Sheet sheet, LookOutcome outcome, SKPoint[] centres, float r, byte alpha = 255)
     {
-        var colour = sheet.Colours.Outcomes[(int)outcome];
+        var colour = sheet.Colours.Outcomes[(int)outcome].WithAlpha(alpha);
         if (outcome == LookOutcome.Detected)
         {
             sheet.Discs(centres, r, colour);

@@ -5,7 +5,7 @@ namespace ScanSim.Display.Painting;
 /// <summary>Scale bar, north arrow, site mark and name.</summary>
 internal sealed class PlanFurniture
 {
-    private readonly Sheet sheet;
+    private Sheet sheet;
     private readonly PlanProjection plan;
     private readonly string siteName;
     private readonly float barPx;
@@ -25,6 +25,7 @@ internal sealed class PlanFurniture
         barText = RangeText.OfStep(barM, unit);
         barBox = SKRect.Create(plan.Area.Left + 16, plan.Area.Bottom - 38, Math.Max(barPx, sheet.Width(barText, TextStyle.Small)) + 4, 26);
         arrowBox = SKRect.Create(plan.Area.Left + 14, plan.Area.Top + 12, 20, 46);
+        arrowBox = plan.UpRad == 0 ? arrowBox : SKRect.Create(arrowBox.Left, arrowBox.Top, 46, 46);
         siteBox = SiteBox(new SKSize(sheet.Width(this.siteName, TextStyle.Strong) + 4, 15), targets);
     }
 
@@ -32,6 +33,14 @@ internal sealed class PlanFurniture
     public IReadOnlyList<SKRect> Boxes => [barBox, arrowBox, siteBox, SiteMark];
 
     private SKRect SiteMark => new(plan.Origin.X - 7, plan.Origin.Y - 7, plan.Origin.X + 7, plan.Origin.Y + 7);
+
+    /// <summary>The same on another sheet.</summary>
+    public PlanFurniture With(Sheet other)
+    {
+        var copy = (PlanFurniture)MemberwiseClone();
+        copy.sheet = other;
+        return copy;
+    }
 
     public void Paint()
     {
@@ -72,6 +81,8 @@ internal sealed class PlanFurniture
     {
         var quiet = sheet.Colours.Quiet;
         var (x, top) = (arrowBox.MidX, arrowBox.Top);
+        sheet.Canvas.Save();
+        sheet.Canvas.RotateDegrees((float)(-plan.UpRad * (180 / Math.PI)), arrowBox.MidX, arrowBox.MidY);
         using var head = new SKPath();
         head.MoveTo(x, top);
         head.LineTo(x + 5, top + 13);
@@ -81,5 +92,6 @@ internal sealed class PlanFurniture
         sheet.Fill(head, quiet);
         sheet.Line(new SKPoint(x, top + 9), new SKPoint(x, top + 26), 1.5f, quiet);
         sheet.Text("N", x, top + 41, TextStyle.Strong, quiet, SKTextAlign.Center);
+        sheet.Canvas.Restore();
     }
 }

@@ -8,23 +8,29 @@ internal sealed class PlanGrid
     private const float BearingLabelPx = 14;
     private const float LeastRingGapPx = 34;
 
+    /// <summary>A target's ring, and a unit beside it.</summary>
+    private const float SymbolPx = 6.5f;
+
     /// <summary>From this radius on there is room for a label every 10 degrees.</summary>
     private const float DenseRadiusPx = 420;
 
     /// <summary>Where ring labels stand, in degrees, in order of preference: between the 30 degree lines.</summary>
     private static readonly int[] RingLabelBearingsDeg = [45, 135, 225, 315, 75, 105, 255, 285, 15, 165, 195, 345];
 
-    private readonly Sheet sheet;
+    private Sheet sheet;
     private readonly PlanProjection plan;
     private readonly double instrumentedRangeM;
     private readonly IReadOnlyList<SKRect> taken;
+    private readonly IReadOnlyList<SKPoint> symbols;
     private readonly List<GridLabel> labels = [];
     private readonly List<double> ringsM = [];
 
     public PlanGrid(
-        Sheet sheet, PlanProjection plan, double instrumentedRangeM, double shownRangeM, RangeUnit unit, IReadOnlyList<SKRect> taken)
+        Sheet sheet, PlanProjection plan, double instrumentedRangeM, double shownRangeM, RangeUnit unit, IReadOnlyList<SKRect> taken,
+        IReadOnlyList<SKPoint> symbols)
     {
         this.taken = taken;
+        this.symbols = symbols;
         this.sheet = sheet;
         this.plan = plan;
         this.instrumentedRangeM = instrumentedRangeM;
@@ -44,6 +50,14 @@ internal sealed class PlanGrid
     {
         var metres = RangeText.MetresPerUnit(unit);
         return NiceStep.AtLeast(Math.Max(shownRangeM / 6, LeastRingGapPx * metresPerPx) / metres) * metres;
+    }
+
+    /// <summary>The same grid on another sheet.</summary>
+    public PlanGrid With(Sheet other)
+    {
+        var copy = (PlanGrid)MemberwiseClone();
+        copy.sheet = other;
+        return copy;
     }
 
     public void PaintLines()
@@ -87,9 +101,11 @@ internal sealed class PlanGrid
         var bearingsRad = RingLabelBearingsDeg.Select(b => b * (Math.PI / 180)).OrderByDescending(LabelledRings).ToList();
         foreach (var rangeM in ringsM)
         {
-            foreach (var bearingRad in bearingsRad)
+            // Beside the targets if that can be; under one rather than nowhere.
+            var text = RangeText.OfStep(rangeM, unit);
+            foreach (var bearingRad in bearingsRad.OrderBy(b => IsUnderSymbol(BoxAt(text, plan.Polar(rangeM, b))) ? 1 : 0))
             {
-                if (TryAdd(RangeText.OfStep(rangeM, unit), plan.Polar(rangeM, bearingRad)))
+                if (TryAdd(text, plan.Polar(rangeM, bearingRad)))
                 {
                     break;
                 }
@@ -97,6 +113,12 @@ internal sealed class PlanGrid
         }
 
         int LabelledRings(double bearingRad) => ringsM.Count(r => IsClear(BoxAt(RangeText.OfStep(r, unit), plan.Polar(r, bearingRad))));
+    }
+
+    private bool IsUnderSymbol(SKRect box)
+    {
+        var reach = SKRect.Inflate(box, SymbolPx, SymbolPx);
+        return symbols.Any(symbol => reach.Contains(symbol));
     }
 
     private void LayBearings()
@@ -118,7 +140,7 @@ internal sealed class PlanGrid
     {
         var inner = SKRect.Inflate(plan.Area, -18, -12);
         var origin = plan.Origin;
-        var (sin, cos) = Math.SinCos(bearingRad);
+        var (sin, cos) = Math.SinCos(bearingRad - plan.UpRad);
         var leave = plan.ToPx(instrumentedRangeM) - 20.0;
         leave = Math.Min(leave, Along(sin, inner.Left - origin.X, inner.Right - origin.X));
         leave = Math.Min(leave, Along(-cos, inner.Top - origin.Y, inner.Bottom - origin.Y));

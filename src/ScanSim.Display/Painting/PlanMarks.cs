@@ -16,7 +16,8 @@ internal sealed class PlanMarks(Sheet sheet, PlanProjection plan, Scene scene, V
         {
             if (TruthAtTime.At(target.Truth, timeS, periodS) is { } now && plan.ToPlan(now.EastM, now.NorthM) is var place && plan.Area.Contains(place))
             {
-                found.Add(new TargetNow(target, place, now.EastMps, now.NorthMps, now.View == TargetView.InView));
+                var (rightMps, upMps) = plan.Turn(now.EastMps, now.NorthMps);
+                found.Add(new TargetNow(target, place, (float)rightMps, (float)upMps, now.View == TargetView.InView));
             }
         }
 
@@ -118,7 +119,7 @@ internal sealed class PlanMarks(Sheet sheet, PlanProjection plan, Scene scene, V
         using var outOfView = new SKPath();
         foreach (var target in targets)
         {
-            Glyphs.Truth(target.IsInView ? inView : outOfView, target.Position, target.EastMps, target.NorthMps, target.IsInView, plan.SymbolScale);
+            Glyphs.Truth(target.IsInView ? inView : outOfView, target.Position, target.RightMps, target.UpMps, target.IsInView, plan.SymbolScale);
         }
 
         sheet.Outline(outOfView, 1.3f, sheet.Colours.Quiet);
@@ -131,7 +132,7 @@ internal sealed class PlanMarks(Sheet sheet, PlanProjection plan, Scene scene, V
         return scene.Plots.AsSpan()[first..FirstAfter(scene.Plots, timeS)];
     }
 
-    private static int FirstAfter(ImmutableArray<PlotMark> plots, double timeS)
+    public static int FirstAfter(ImmutableArray<PlotMark> plots, double timeS)
     {
         var low = 0;
         var high = plots.Length;
@@ -160,7 +161,7 @@ internal sealed class PlanMarks(Sheet sheet, PlanProjection plan, Scene scene, V
         path.MoveTo(origin);
         path.ArcTo(
             new SKRect(origin.X - radius, origin.Y - radius, origin.X + radius, origin.Y + radius),
-            (float)(fromRad * (180 / Math.PI) - 90),
+            (float)((fromRad - plan.UpRad) * (180 / Math.PI) - 90),
             (float)(widthRad * (180 / Math.PI)),
             false);
         path.Close();

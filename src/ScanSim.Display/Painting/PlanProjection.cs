@@ -2,14 +2,19 @@ using SkiaSharp;
 
 namespace ScanSim.Display.Painting;
 
-/// <summary>From metres east and north of the site to layout units of the plan, north up.</summary>
+/// <summary>From metres east and north of the site to layout units of the plan and back; north or another bearing is up.</summary>
 internal sealed class PlanProjection
 {
     /// <summary>Kept free between the range shown and the plan's nearer edges, for the bearing labels.</summary>
     public const float MarginPx = 30;
 
-    public PlanProjection(SKRect area, double centreEastM, double centreNorthM, double rangeM)
+    private readonly double sinUp;
+    private readonly double cosUp;
+
+    public PlanProjection(SKRect area, double centreEastM, double centreNorthM, double rangeM, double upRad = 0)
     {
+        UpRad = upRad;
+        (sinUp, cosUp) = Math.SinCos(upRad);
         Area = area;
         CentreEastM = centreEastM;
         CentreNorthM = centreNorthM;
@@ -24,12 +29,27 @@ internal sealed class PlanProjection
 
     public double MetresPerPx { get; }
 
+    /// <summary>The bearing that points up.</summary>
+    public double UpRad { get; }
+
     /// <summary>The site.</summary>
     public SKPoint Origin => ToPlan(0, 0);
 
-    public SKPoint ToPlan(double eastM, double northM) => new(
-        (float)(Area.MidX + (eastM - CentreEastM) / MetresPerPx),
-        (float)(Area.MidY - (northM - CentreNorthM) / MetresPerPx));
+    public SKPoint ToPlan(double eastM, double northM)
+    {
+        var (right, up) = Turn(eastM - CentreEastM, northM - CentreNorthM);
+        return new((float)(Area.MidX + right / MetresPerPx), (float)(Area.MidY - up / MetresPerPx));
+    }
+
+    /// <summary>What lies under a point of the plan.</summary>
+    public (double EastM, double NorthM) FromPlan(SKPoint point)
+    {
+        var (rightM, upM) = ((point.X - Area.MidX) * MetresPerPx, (Area.MidY - point.Y) * MetresPerPx);
+        return (CentreEastM + rightM * cosUp + upM * sinUp, CentreNorthM - rightM * sinUp + upM * cosUp);
+    }
+
+    /// <summary>A direction east and north as one to the right and up.</summary>
+    public (double Right, double Up) Turn(double east, double north) => (east * cosUp - north * sinUp, east * sinUp + north * cosUp);
 
     /// <summary>A point at a range and a bearing (clockwise from north) from the site.</summary>
     public SKPoint Polar(double rangeM, double bearingRad)

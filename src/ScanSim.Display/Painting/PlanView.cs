@@ -17,7 +17,7 @@ internal static class PlanView
         var marks = new PlanMarks(sheet, plan, scene, view, timeS);
         var targets = view.ShowTruth ? marks.TargetsNow() : [];
         var furniture = new PlanFurniture(sheet, plan, scene.SiteName, view.Unit, targets);
-        var grid = new PlanGrid(sheet, plan, scene.InstrumentedRangeM, view.RangeM ?? scene.InstrumentedRangeM, view.Unit, [.. furniture.Boxes, CountBox(area)]);
+        var grid = new PlanGrid(sheet, plan, scene.InstrumentedRangeM, view.RangeM ?? scene.InstrumentedRangeM, view.Unit, [.. furniture.Boxes, CountBox(area)], [.. targets.Select(t => t.Position)]);
         marks.PaintBlanked();
         grid.PaintLines();
         if (view.ShowTruth)
@@ -52,10 +52,10 @@ internal static class PlanView
     /// <summary>Two marks along the course stroke: a label prefers the other sides.</summary>
     private static IEnumerable<SKPoint> CourseMarks(TargetNow target)
     {
-        var speed = MathF.Sqrt(target.EastMps * target.EastMps + target.NorthMps * target.NorthMps);
+        var speed = MathF.Sqrt(target.RightMps * target.RightMps + target.UpMps * target.UpMps);
         if (target.IsInView && speed > 0)
         {
-            var (ux, uy) = (target.EastMps / speed, -target.NorthMps / speed);
+            var (ux, uy) = (target.RightMps / speed, -target.UpMps / speed);
             yield return new SKPoint(target.Position.X + 9 * ux, target.Position.Y + 9 * uy);
             yield return new SKPoint(target.Position.X + 12 * ux, target.Position.Y + 12 * uy);
         }
@@ -63,7 +63,7 @@ internal static class PlanView
 
     private static SKRect CountBox(SKRect area) => new(area.Right - 190, area.Bottom - 28, area.Right, area.Bottom);
 
-    private static void PaintLabels(Sheet sheet, SKRect area, LabelLayout layout)
+    public static void PaintLabels(Sheet sheet, SKRect area, LabelLayout layout)
     {
         foreach (var label in layout.Placed)
         {

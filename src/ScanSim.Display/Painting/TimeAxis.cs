@@ -8,21 +8,27 @@ internal sealed class TimeAxis(Sheet sheet, Scene scene, SKRect rows)
     private const float LeastTickPx = 84;
 
     /// <summary>Tick times in seconds since the start.</summary>
-    public static IEnumerable<double> TicksS(DateTimeOffset startUtc, double durationS, double stepS)
+    public static IEnumerable<double> TicksS(DateTimeOffset startUtc, double durationS, double stepS) => TicksS(startUtc, 0, durationS, stepS);
+
+    /// <summary>The same for a part of the time.</summary>
+    public static IEnumerable<double> TicksS(DateTimeOffset startUtc, double fromS, double toS, double stepS)
     {
         var startOfDayS = startUtc.ToUniversalTime().TimeOfDay.TotalSeconds;
-        for (var n = Math.Ceiling(startOfDayS / stepS); n * stepS - startOfDayS <= durationS; n++)
+        for (var n = Math.Ceiling((startOfDayS + fromS) / stepS); n * stepS - startOfDayS <= toS; n++)
         {
             yield return n * stepS - startOfDayS;
         }
     }
 
-    public void Paint()
+    public void Paint() => Paint(0, scene.DurationS);
+
+    /// <summary>Ticks of the part of the time that the rows show.</summary>
+    public void Paint(double fromS, double toS)
     {
-        var stepS = NiceStep.TimeAtLeast(scene.DurationS * LeastTickPx / rows.Width);
-        foreach (var tickS in TicksS(scene.StartUtc, scene.DurationS, stepS))
+        var stepS = NiceStep.TimeAtLeast((toS - fromS) * LeastTickPx / rows.Width);
+        foreach (var tickS in TicksS(scene.StartUtc, fromS, toS, stepS))
         {
-            var x = rows.Left + (float)(tickS / scene.DurationS) * rows.Width;
+            var x = rows.Left + (float)((tickS - fromS) / (toS - fromS)) * rows.Width;
             sheet.Line(new SKPoint(x, rows.Top), new SKPoint(x, rows.Bottom + 4), 1, sheet.Colours.Grid);
             sheet.Text(Label(tickS, stepS), x, rows.Bottom + 16, TextStyle.Small, sheet.Colours.Quiet, SKTextAlign.Center);
         }

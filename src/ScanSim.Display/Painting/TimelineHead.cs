@@ -55,7 +55,7 @@ internal sealed class TimelineHead
         }
     }
 
-    private static IEnumerable<LookOutcome> Occurring(Scene scene)
+    public static IEnumerable<LookOutcome> Occurring(Scene scene)
     {
         var found = new HashSet<LookOutcome>();
         foreach (var target in scene.Targets)

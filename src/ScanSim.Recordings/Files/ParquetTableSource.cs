@@ -9,7 +9,8 @@ namespace ScanSim.Recordings.Files;
 internal sealed class ParquetTableSource : ITableSource
 {
     private readonly ParquetReader reader;
-    private readonly ImmutableArray<DataField> fields;
+    private readonly ImmutableArray<(int Column, DataField Field)> fields;
+    private readonly DataField? timeField;
     private readonly Column? time;
     private readonly TimeSpanS span;
     private readonly long mostRows;
@@ -17,15 +18,16 @@ internal sealed class ParquetTableSource : ITableSource
 
     /// <summary>Opens the file and finds its columns.</summary>
     /// <param name="stream">The file, seekable.</param>
-    /// <param name="columns">The columns that the file must have.</param>
+    /// <param name="columns">The columns to read; the file must have them.</param>
     /// <param name="timeColumn">The one whose statistics are compared with <paramref name="span"/>.</param>
     /// <param name="span">Times wanted.</param>
     /// <param name="mostRows">No row group may claim more rows than this: a broken footer shall not ask for all memory.</param>
     public ParquetTableSource(Stream stream, ImmutableArray<Column> columns, Column? timeColumn, TimeSpanS span, long mostRows)
     {
         reader = ParquetReader.CreateAsync(stream, leaveStreamOpen: true).GetAwaiter().GetResult();
-        fields = [.. columns.Select(Find)];
+        fields = [.. columns.Select(column => (column.Index, Find(column)))];
         time = timeColumn;
+        timeField = timeColumn is null ? null : Find(timeColumn);
         this.span = span;
         this.mostRows = mostRows;
     }
@@ -57,9 +59,9 @@ internal sealed class ParquetTableSource : ITableSource
             throw new FormatException($"a row group claims {group.RowCount} rows, the table has {mostRows}");
         }
 
-        for (var i = 0; i < fields.Length; i++)
+        foreach (var (column, field) in fields)
         {
-            block[i].ReadAsync(group, fields[i], (int)group.RowCount).AsTask().GetAwaiter().GetResult();
+            block[column].ReadAsync(group, field, (int)group.RowCount).AsTask().GetAwaiter().GetResult();
         }
 
         if (StatedTimes(group) is { } stated)
@@ -86,7 +88,7 @@ internal sealed class ParquetTableSource : ITableSource
         span.IsEverything || StatedTimes(group) is not { } stated || span.Overlaps(stated.FromS, stated.ToS);
 
     private TimeSpanS? StatedTimes(ParquetRowGroupReader group) =>
-        time is not null && group.GetStatistics(fields[time.Index]) is { MinValue: double first, MaxValue: double last }
+        timeField is not null && group.GetStatistics(timeField) is { MinValue: double first, MaxValue: double last }
             ? new TimeSpanS(first, last)
             : null;
 

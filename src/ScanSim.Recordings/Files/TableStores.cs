@@ -1,3 +1,4 @@
+using System.Collections.Immutable;
 using ScanSim.Recordings.Columns;
 using ScanSim.Recordings.Tables;
 
@@ -15,10 +16,10 @@ internal static class TableStores
             _ => throw new ArgumentOutOfRangeException(nameof(format), format, "is no table format"),
         };
 
-    public static ITableSource Open(TableFormat format, Stream stream, Table table, TimeSpanS span, long rows) =>
+    public static ITableSource Open(TableFormat format, Stream stream, Table table, ImmutableArray<Column> columns, TimeSpanS span, long rows) =>
         format switch
         {
-            TableFormat.Parquet => new ParquetTableSource(stream, table.Columns, table.TimeColumn, span, rows),
+            TableFormat.Parquet => new ParquetTableSource(stream, columns, table.TimeColumn, span, rows),
             TableFormat.Csv => new CsvTableSource(stream, table.Columns),
             TableFormat.JsonLines => new JsonLinesTableSource(stream),
             _ => throw new ArgumentOutOfRangeException(nameof(format), format, "is no table format"),

@@ -1,3 +1,4 @@
+using System.Collections.Immutable;
 using ScanSim.Recordings.Columns;
 
 namespace ScanSim.Recordings.Tables;
@@ -86,6 +87,13 @@ internal sealed class LookTable : Table<LookRow>
         lostTo = Text("lost_to", "what a missed look was lost to; empty when detected", (in row) => EnumTexts.Loss[(int)row.LostTo]);
         targetsInCell = Count("targets_in_cell", "targets in this range cell and dwell, this one included", (in row) => row.TargetsInCell);
     }
+
+    public ImmutableArray<Column> SummaryColumns => [timeS, scan, target, snrDb, detected, lostTo];
+
+    public LookSummary Summary(ColumnBlock block, int row) =>
+        new(timeS[block, row], scan[block, row], target[block, row], snrDb[block, row], detected[block, row], EnumTexts.Loss.Parse(lostTo[block, row]));
+
+    public bool IsOf(string id, ColumnBlock block, int row) => string.Equals(target[block, row], id, StringComparison.Ordinal);
 
     public override LookRow Build(ColumnBlock block, int row) =>
         new()

@@ -1,3 +1,4 @@
+using System.Collections.Immutable;
 using ScanSim.Recordings.Columns;
 
 namespace ScanSim.Recordings.Tables;
@@ -45,6 +46,10 @@ internal sealed class PlotTable : Table<PlotRow>
         kind = Text("kind", "what the plot came from", (in row) => EnumTexts.Echo[(int)row.Kind]);
         target = Text("target", "ids joined by '+', the strongest first; empty for noise", (in row) => row.Target);
     }
+
+    public ImmutableArray<Column> SummaryColumns => [timeS, kind, target];
+
+    public PlotSummary Summary(ColumnBlock block, int row) => new(timeS[block, row], EnumTexts.Echo.Parse(kind[block, row]), target[block, row]);
 
     public override PlotRow Build(ColumnBlock block, int row) =>
         new()

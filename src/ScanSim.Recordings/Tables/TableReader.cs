@@ -1,3 +1,4 @@
+using System.Collections.Immutable;
 using ScanSim.Recordings.Columns;
 using ScanSim.Recordings.Files;
 
@@ -15,7 +16,14 @@ internal sealed class TableReader : IDisposable
     private readonly ITableSource source;
     private long rows;
 
-    public TableReader(string path, Table table, TableFormat format, long expectedRows, TimeSpanS span)
+    /// <summary>Opens a table's file.</summary>
+    /// <param name="path">The file.</param>
+    /// <param name="table">What it holds.</param>
+    /// <param name="format">Its store.</param>
+    /// <param name="expectedRows">As the manifest says.</param>
+    /// <param name="span">Times wanted.</param>
+    /// <param name="columns">Those that are needed, the first one among them; a store may leave the others empty. Default: all.</param>
+    public TableReader(string path, Table table, TableFormat format, long expectedRows, TimeSpanS span, ImmutableArray<Column> columns = default)
     {
         this.path = path;
         this.expectedRows = expectedRows;
@@ -25,7 +33,7 @@ internal sealed class TableReader : IDisposable
         stream = FileFault.Reading(path, () => new FileStream(path, FileMode.Open, FileAccess.Read, FileShare.Read, 1 << 16));
         try
         {
-            source = Guard(() => TableStores.Open(format, stream, table, span, expectedRows));
+            source = Guard(() => TableStores.Open(format, stream, table, columns.IsDefault ? table.Columns : columns, span, expectedRows));
         }
         catch
         {
@@ -50,11 +58,13 @@ internal sealed class TableReader : IDisposable
 
     public bool IsWithin(ColumnBlock from, int row) => time is null || span.Contains(((ColumnValues<double>)from[time.Index])[row]);
 
-    public TRow Build<TRow>(Table<TRow> table, ColumnBlock from, int row)
+    public TRow Build<TRow>(Table<TRow> table, ColumnBlock from, int row) => Build(table.Build, from, row);
+
+    public TRow Build<TRow>(Func<ColumnBlock, int, TRow> build, ColumnBlock from, int row)
     {
         try
         {
-            return table.Build(from, row);
+            return build(from, row);
         }
         catch (FormatException fault)
         {

@@ -1,3 +1,4 @@
+using System.Collections.Immutable;
 using ScanSim.Recordings.Columns;
 
 namespace ScanSim.Recordings.Tables;
@@ -44,6 +45,22 @@ internal sealed class TruthTable : Table<TruthRow>
             (in row) => EnumTexts.View[(int)row.View]
         );
     }
+
+    public ImmutableArray<Column> SummaryColumns => [timeS, scan, target, heightM, eastMps, northMps, rangeM, azimuthDeg, view];
+
+    public TruthSummary Summary(ColumnBlock block, int row) =>
+        new()
+        {
+            TimeS = timeS[block, row],
+            Scan = scan[block, row],
+            Target = target[block, row],
+            HeightM = heightM[block, row],
+            EastMps = eastMps[block, row],
+            NorthMps = northMps[block, row],
+            RangeM = rangeM[block, row],
+            AzimuthDeg = azimuthDeg[block, row],
+            View = EnumTexts.View.Parse(view[block, row]),
+        };
 
     public override TruthRow Build(ColumnBlock block, int row) =>
         new()
