@@ -18,13 +18,13 @@ public sealed class ReplayTimes(ITestOutputHelper output)
             var start = Stopwatch.GetTimestamp();
             var recording = ReplayRecording.Open(folder);
             var openedMs = Stopwatch.GetElapsedTime(start).TotalMilliseconds;
-            output.WriteLine($"{recording.Name}: opened in {openedMs:0} ms, {Process.GetCurrentProcess().WorkingSet64 >> 20} MB of memory in use");
+            output.WriteLine($"{recording.Name}: opened in {openedMs:0} ms, {Process.GetCurrentProcess().WorkingSet64 >> 20} MB of memory in use, {GC.GetTotalAllocatedBytes() >> 20} MB allocated, {GC.GetTotalMemory(false) >> 20} MB on the heap");
             foreach (var (speed, isSelected, isShort) in ((double, bool, bool)[])[(1, false, false), (1, true, true), (16, true, false), (64, false, true)])
             {
                 Print(recording, speed, isSelected, isShort);
             }
 
-            output.WriteLine($"{Process.GetCurrentProcess().PeakWorkingSet64 >> 20} MB at the most");
+            output.WriteLine($"{Process.GetCurrentProcess().PeakWorkingSet64 >> 20} MB at the most, {GC.GetTotalAllocatedBytes() >> 20} MB allocated, {GC.GetTotalMemory(true) >> 20} MB are needed");
         }
     }
 
@@ -45,6 +45,7 @@ public sealed class ReplayTimes(ITestOutputHelper output)
         screen.WaitForRows();
         using var surface = SKSurface.Create(new SKImageInfo(1280, 800, SKImageInfo.PlatformColorType, SKAlphaType.Premul));
         var times = new List<double>();
+        var allocated = GC.GetTotalAllocatedBytes();
         for (var frame = 0; frame < 220; frame++)
         {
             var start = Stopwatch.GetTimestamp();
@@ -53,8 +54,9 @@ public sealed class ReplayTimes(ITestOutputHelper output)
             times.Add(Stopwatch.GetElapsedTime(start).TotalMilliseconds);
         }
 
+        allocated = GC.GetTotalAllocatedBytes() - allocated;
         var settled = times.Skip(20).Order().ToList();
-        output.WriteLine($"  speed {speedRatio}, {(isSelected ? "one selected" : "none selected")}, timeline {(isShort ? "zoomed" : "whole")}: p50 {settled[100]:0.0} ms, p99 {settled[197]:0.0} ms; {string.Join(", ", screen.Painter.Counts())}");
+        output.WriteLine($"  speed {speedRatio}, {(isSelected ? "one selected" : "none selected")}, timeline {(isShort ? "zoomed" : "whole")}: p50 {settled[100]:0.0} ms, p99 {settled[197]:0.0} ms; {allocated / 220 >> 10} KB allocated a frame; {string.Join(", ", screen.Painter.Counts())}");
         Assert.True(times[0] > 0);
     }
 }
