@@ -72,7 +72,7 @@ internal sealed class TargetGathering(Target target, double reachS, int scans)
         {
             Id = target.Id,
             Class = target.Class,
-            Truth = truth.Count == truth.Capacity ? truth.MoveToImmutable() : truth.ToImmutable(),
+            Truth = truth.ToImmutable(),
             Looks = marks.DrainToImmutable(),
             ScansInView = inView,
             ScansWithPlot = withPlot,
