@@ -18,6 +18,7 @@ internal static class CommandTree
         Add(root, examples, SchemaCommand.Create());
         Add(root, examples, BudgetCommand.Create());
         Add(root, examples, PictureCommand.Create());
+        Add(root, examples, ViewCommand.Create(interruption));
         Add(root, examples, ExplainCommand.Create());
         root.Options.OfType<HelpOption>().Single().Action = new HelpWithExample(examples);
         var parsed = root.Parse(args);

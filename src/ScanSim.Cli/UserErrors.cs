@@ -1,5 +1,6 @@
 using ScanSim.Display;
 using ScanSim.Display.Overlays;
+using ScanSim.Display.Windowing;
 using ScanSim.Recordings;
 using ScanSim.Scenarios;
 
@@ -30,7 +31,7 @@ internal static class UserErrors
     }
 
     private static bool IsTheUsers(Exception error) =>
-        error is ScenarioException or RecordingException or PictureException or OverlayException or InputException or IOException or UnauthorizedAccessException;
+        error is ScenarioException or RecordingException or PictureException or OverlayException or WindowException or InputException or IOException or UnauthorizedAccessException;
 
     private static int Tell(Exception error)
     {

@@ -34,7 +34,7 @@ public sealed class ReplayRowsTests
         using var screen = ReplayMaking.Screen([left, right]);
         foreach (var id in (string[])["a", "b", "c"])
         {
-            screen.Press(ReplayMaking.Key(Windowing.WindowKey.Tab));
+            screen.Press(ReplayMaking.Key(ScanSim.Display.Windowing.WindowKey.Tab));
             PaintOnce(screen);
             Assert.Contains(screen.State.Selected, (string[])["a", "b", "c"]);
         }
