@@ -19,7 +19,7 @@ internal static class ExplainCommand
         var to = QuantityOption.Create("--to", Dimension.Time, "TIME", "End at this time [default: the recording's end].", 0);
         var pd = new Option<double>("--pd")
         {
-            Description = $"Detection probability to give the needed SNR and range for, besides 0.5 [default: {LookExplainer.UsualPd.ToString(CultureInfo.InvariantCulture)}].",
+            Description = "Detection probability to give the needed SNR and range for, besides 0.5.",
             HelpName = "P",
             CustomParser = ParseProbability,
             DefaultValueFactory = _ => LookExplainer.UsualPd,

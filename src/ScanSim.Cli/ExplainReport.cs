@@ -81,14 +81,23 @@ internal static class ExplainReport
         output.WriteLine();
         TextTable.Write(
             output,
-            ["term", ">mean loss, missed", ">mean loss, seen", ">cost most in"],
-            terms.OrderByDescending(t => story.CostliestIn(t)).ThenBy(t => t).Select(t => new[]
+            ["term", ">mean loss, missed", ">mean loss, seen", ">difference", ">cost most in"],
+            terms.OrderByDescending(story.CostliestIn).ThenByDescending(t => DifferenceDb(story, t)).Select(t => new[]
             {
-                Words(t), Loss(story.MeanLossDb(t, missed: true)), Loss(story.MeanLossDb(t, missed: false)), Line($"{story.CostliestIn(t)} of {missed} missed looks"),
+                Words(t), Loss(story.MeanLossDb(t, missed: true)), Loss(story.MeanLossDb(t, missed: false)), Loss(DifferenceDb(story, t)), Line($"{story.CostliestIn(t)} of {missed} missed looks"),
             }));
         var costliest = terms.MaxBy(story.CostliestIn);
-        output.WriteLine(Line($"The term that cost most: {Words(costliest)}, in {story.CostliestIn(costliest)} of {missed} missed looks. Range counts from where Pd is 0.5 in free space; below 0 it is in hand."));
+        output.WriteLine(Line($"The term that cost most: {Words(costliest)}, in {story.CostliestIn(costliest)} of {missed} missed looks."));
+        var telling = terms.MaxBy(t => DifferenceDb(story, t));
+        if (DifferenceDb(story, telling) > 0)
+        {
+            output.WriteLine(Line($"What set missed looks apart from seen ones most: {Words(telling)}, {DifferenceDb(story, telling):0.0} dB in the mean."));
+        }
+
+        output.WriteLine("Losses are against free space at the beam's peak; range counts from where Pd is 0.5, and below 0 it is in hand.");
     }
+
+    private static double DifferenceDb(TargetStory story, LookTerm term) => story.MeanLossDb(term, missed: true) - story.MeanLossDb(term, missed: false);
 
     private static void WriteStretches(TextWriter output, ImmutableArray<ImmutableArray<TargetPass>> stretches, RangeUnit unit)
     {
@@ -128,7 +137,7 @@ internal static class ExplainReport
         PassOutcome.ElevationBeam => "missed: off the beam's elevation",
         PassOutcome.Eclipsing => "missed: eclipsed",
         PassOutcome.Chance => "missed by chance (Pd 0.5 or more)",
-        PassOutcome.SharedCell => "cancelled by another target in its cell",
+        PassOutcome.SharedCell => "missed in one cell with another target",
         PassOutcome.HitWithoutPlot => "hit, but no plot",
         PassOutcome.TooWeakForLook => "too weak for a look",
         PassOutcome.NoDwell => "no dwell met it",
@@ -146,7 +155,7 @@ internal static class ExplainReport
         _ => "eclipsing",
     };
 
-    private static string Loss(double lossDb) => double.IsNaN(lossDb) ? "–" : Line($"{lossDb:0.0} dB");
+    private static string Loss(double lossDb) => double.IsNaN(lossDb) ? "–" : Line($"{Math.Round(lossDb, 1) + 0.0:0.0} dB");
 
     private static string Line(FormattableString text) => text.ToString(CultureInfo.InvariantCulture);
 }

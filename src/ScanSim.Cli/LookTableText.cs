@@ -9,7 +9,7 @@ internal static class LookTableText
 {
     private static readonly string[] Columns =
     [
-        ">time", ">scan", ">range", ">bearing", ">elev.", ">radar", ">RCS", ">spreading", ">az. beam", ">el. beam", ">eclipsing", ">SNR dB", ">need", ">margin", ">Pd", ">drawn RCS", ">over thr.", "outcome",
+        ">time", ">scan", ">range", ">bearing", ">elev.", ">radar", ">RCS", ">spreading", ">azimuth", ">elevation", ">eclipsing", ">SNR dB", ">need", ">margin", ">Pd", ">drawn RCS", ">over thr.", "outcome",
     ];
 
     public static void Write(TextWriter output, IEnumerable<TargetPass> passes, RangeUnit unit) => TextTable.Write(output, Columns, Rows([.. passes], unit));
@@ -22,6 +22,11 @@ internal static class LookTableText
             foreach (var look in pass.Looks)
             {
                 yield return LookRow(look, ReferenceEquals(look, pass.Best) ? pass.Reason : look.Reason, unit);
+            }
+
+            if (pass.SideLooks > 0)
+            {
+                yield return [Line($"{pass.TimeS:0.00} s"), Line($"{pass.Scan}"), .. Enumerable.Repeat("", Columns.Length - 3), Line($"and {pass.SideLooks} looks through side lobes, without a hit")];
             }
 
             if (!pass.Looks.IsEmpty)
@@ -85,7 +90,8 @@ internal static class LookTableText
         ];
     }
 
-    private static string Db(double db) => double.IsNegativeInfinity(db) ? "−∞" : Line($"{db:0.0}");
+    /// <summary>What rounds to nothing is 0.0, never -0.0.</summary>
+    private static string Db(double db) => double.IsNegativeInfinity(db) ? "−∞" : Line($"{Math.Round(db, 1) + 0.0:0.0}");
 
     private static string Line(FormattableString text) => text.ToString(CultureInfo.InvariantCulture);
 }

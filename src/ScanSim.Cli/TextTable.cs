@@ -7,7 +7,7 @@ namespace ScanSim.Cli;
 internal static class TextTable
 {
     /// <summary>Wide enough that no table of ours is wrapped.</summary>
-    private const int WidthInCharacters = 240;
+    private const int WidthInCharacters = 400;
 
     /// <summary>Writes the table without trailing blanks.</summary>
     /// <param name="output">Where to.</param>

@@ -30,7 +30,7 @@ internal sealed class ChartAxes(Sheet sheet, ChartData data, DateTimeOffset star
         {
             var y = At(data.FromS, n * step).Y;
             sheet.Line(new SKPoint(plot.Left, y), new SKPoint(plot.Right, y), 1, sheet.Colours.Grid);
-            sheet.Text($"{n * step:0.##}", plot.Left - 8, y + 4, TextStyle.Small, sheet.Colours.Quiet, SKTextAlign.Right);
+            sheet.Text($"{n * step + 0.0:0.##}", plot.Left - 8, y + 4, TextStyle.Small, sheet.Colours.Quiet, SKTextAlign.Right);
         }
 
         sheet.Canvas.Save();

@@ -24,10 +24,17 @@ internal sealed record ChartData
     /// <summary>Half the time from one point to the next: how far a point stands for its surroundings.</summary>
     public required double HalfStepS { get; init; }
 
-    /// <summary>The greatest free-space SNR of the points, that of the nearest look: losses count from here.</summary>
+    /// <summary>Losses count from here: the free-space SNR of the nearest look, or the SNR needed if that is more.</summary>
     public required double TopDb { get; init; }
 
-    public required double NearestM { get; init; }
+    /// <summary>The range that belongs to <see cref="TopDb"/>.</summary>
+    public required double TopRangeM { get; init; }
+
+    /// <summary>Whether the range is that where Pd is one half in free space, not that of the nearest look.</summary>
+    public required bool TopIsNeed { get; init; }
+
+    /// <summary>Whether points are single looks, not passes.</summary>
+    public required bool EachLook { get; init; }
 
     public required double LowestDb { get; init; }
 
@@ -50,6 +57,7 @@ internal sealed record ChartData
             : [.. story.Passes.Select(p => (p.TimeS, OutcomeOf(p.Outcome)))];
         var halfStepS = 0.5 * StepS(outcomes.Select(o => o.Item1), story.ToS - story.FromS);
         var nearest = points.MaxBy(p => p.Look.FreeSpaceSnrDb).Look;
+        var isNeed = nearest.NeededDb > nearest.FreeSpaceSnrDb;
         return new ChartData
         {
             Points = points,
@@ -57,8 +65,10 @@ internal sealed record ChartData
             FromS = eachLook ? points[0].TimeS - 2 * halfStepS : story.FromS,
             ToS = eachLook ? points[^1].TimeS + 2 * halfStepS : story.ToS,
             HalfStepS = halfStepS,
-            TopDb = nearest.FreeSpaceSnrDb,
-            NearestM = nearest.Row.RangeM,
+            TopDb = isNeed ? nearest.NeededDb : nearest.FreeSpaceSnrDb,
+            TopRangeM = isNeed ? nearest.EvenOddsRangeM : nearest.Row.RangeM,
+            TopIsNeed = isNeed,
+            EachLook = eachLook,
             LowestDb = points.Min(p => Math.Max(Math.Min(p.Look.Row.SnrDb, p.Look.NeededDb), p.Look.NeededDb - DeepestDb)) - MarginDb,
             HighestDb = Math.Max(nearest.FreeSpaceSnrDb, points.Max(p => p.Look.NeededForWantedDb)) + MarginDb,
         };

@@ -46,7 +46,7 @@ internal static class ChartLegend
     {
         foreach (var term in Enum.GetValues<LookTerm>())
         {
-            var text = term == LookTerm.Range ? $"lost to range beyond the nearest look ({RangeText.Of(data.NearestM, unit)})" : "to " + TermColours.Name(term);
+            var text = term == LookTerm.Range ? $"lost to range beyond {RangeText.Of(data.TopRangeM, unit)} ({(data.TopIsNeed ? "Pd 0.5 in free space" : "the nearest look")})" : "to " + TermColours.Name(term);
             yield return (text, box => sheet.Rect(box, TermColours.Of(term)));
         }
 

@@ -11,12 +11,16 @@ public sealed class LookExplainer
 {
     public const double UsualPd = 0.9;
 
+    /// <summary>Signal, summed over the pulses, to the noise of one pulse, below which a run computes no look (docs/engine.md).</summary>
+    public const double SummedSnrFloorDb = -20;
+
     private const double EvenOdds = 0.5;
 
     private readonly Scenario scenario;
     private readonly double wantedPd;
     private readonly RangeUnit unit;
     private readonly Dictionary<string, Target> targets;
+    private readonly ElevationCut elevationCut;
     private readonly Dictionary<(FluctuationCase Case, int Pulses), (double EvenDb, double WantedDb)> needs = [];
 
     /// <summary>Begins to reason about one scenario.</summary>
@@ -28,6 +32,7 @@ public sealed class LookExplainer
         this.scenario = scenario;
         this.wantedPd = wantedPd;
         this.unit = unit;
+        elevationCut = new ElevationCut(scenario.Radar.Antenna);
         targets = scenario.Targets.ToDictionary(t => t.Id, StringComparer.Ordinal);
     }
 
@@ -36,11 +41,13 @@ public sealed class LookExplainer
         var mates = cellMates.IsDefault ? [] : cellMates;
         var (evenDb, forWantedDb) = Needs(row);
         var freeSpaceDb = row.RadarDb + row.RcsDb + row.SpreadingDb;
+        var beamDb = row.AzimuthBeamDb + row.ElevationBeamDb;
+        var byElevation = elevationCut.HoldsAtFloor(row.ElevationDeg, beamDb);
         ImmutableArray<TermLoss> losses =
         [
             new(LookTerm.Range, evenDb - freeSpaceDb),
-            new(LookTerm.AzimuthBeam, -row.AzimuthBeamDb),
-            new(LookTerm.ElevationBeam, -row.ElevationBeamDb),
+            new(LookTerm.AzimuthBeam, byElevation ? 0 : -row.AzimuthBeamDb),
+            new(LookTerm.ElevationBeam, byElevation ? -beamDb : -row.ElevationBeamDb),
             new(LookTerm.Eclipsing, -row.EclipsingDb),
         ];
         return new LookExplanation
@@ -54,7 +61,7 @@ public sealed class LookExplainer
             EvenOddsRangeM = RangeAtM(row, evenDb),
             WantedRangeM = RangeAtM(row, forWantedDb),
             Losses = losses,
-            Outcome = OutcomeOf(row),
+            Outcome = byElevation && row.LostTo == LossReason.AzimuthBeam ? PassOutcome.ElevationBeam : OutcomeOf(row),
             Reason = LookWords.Of(row, row.SnrDb - evenDb, losses, mates),
         };
     }

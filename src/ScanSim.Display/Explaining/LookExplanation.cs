@@ -7,7 +7,8 @@ namespace ScanSim.Display.Explaining;
 /// <remarks>
 /// The margin over the SNR that even odds need is split without remainder: <see cref="MarginDb"/> = −Σ <see cref="Losses"/>. Azimuth
 /// beam, elevation beam and eclipsing are losses against the free-space SNR at the beam's peak; range is the spreading beyond
-/// <see cref="EvenOddsRangeM"/>. The needed SNR supposes pulses of equal SNR: for fluctuation cases 2 and 4, where the beam weighs
+/// <see cref="EvenOddsRangeM"/>. They are the row's terms but for one case: at the side-lobe floor, when the elevation alone holds the
+/// look there, the whole of the beam's loss counts as the elevation's (the row may have it under azimuth). The needed SNR supposes pulses of equal SNR: for fluctuation cases 2 and 4, where the beam weighs
 /// the pulses differently, Pd at margin 0 is not exactly one half.
 /// </remarks>
 public sealed record LookExplanation

@@ -12,8 +12,10 @@ internal static class LookWords
     public static string Of(in LookRow row, double marginDb, ImmutableArray<TermLoss> losses, ImmutableArray<string> cellMates) => row.LostTo switch
     {
         LossReason.None when marginDb >= 0 => $"detected with {marginDb:0.0} dB to spare{InOneCell(row, cellMates)}",
-        LossReason.None => $"detected by chance: {-marginDb:0.0} dB below need, Pd was {row.Pd:0.00}, {Draw(row)}{InOneCell(row, cellMates)}",
+        LossReason.None when row.TargetsInCell > 1 => $"detected together with {Names(cellMates)} in the same cell: {-marginDb:0.0} dB below need by itself, Pd {row.Pd:0.00}",
+        LossReason.None => $"detected by chance: {-marginDb:0.0} dB below need, Pd was {row.Pd:0.00}, {Draw(row)}",
         LossReason.Fluctuation => $"missed by chance: Pd was {row.Pd:0.00}, {Draw(row)}",
+        LossReason.SharedCell when row.FluctuationDb is { } drawnDb && marginDb + drawnDb < 0 => $"missed in one cell with {Names(cellMates)}: Pd alone was {row.Pd:0.00}, {Draw(row)}",
         LossReason.SharedCell => $"cancelled by {Names(cellMates)} in the same cell: Pd alone was {row.Pd:0.00}",
         _ when double.IsNegativeInfinity(marginDb) => "missed: the whole echo came while the receiver was shut",
         _ => $"missed: {-marginDb:0.0} dB below need: {Split(losses)}",

@@ -9,9 +9,6 @@ namespace ScanSim.Display.Explaining;
 /// <summary>Why a scan has no look at a target: geometry, timeline, or too little signal.</summary>
 internal sealed class NoLookReasons(Scenario scenario, RangeUnit unit)
 {
-    /// <summary>Signal, summed over the pulses, to the noise of one pulse, below which a run computes no look (docs/engine.md).</summary>
-    public const double SummedSnrFloorDb = -20;
-
     private const double DegPerRad = 180 / Math.PI;
 
     /// <summary>SNR per pulse of 1 m² at 1 m at the peak of the beam.</summary>
@@ -89,7 +86,7 @@ internal sealed class NoLookReasons(Scenario scenario, RangeUnit unit)
 
         var snrDb = RadarDb(scenario) + Decibels.FromRatio(target.RcsM2) - 4 * Decibels.FromRatio(rangeM) + Decibels.FromRatio(openRatio);
         var summedDb = snrDb + Decibels.FromRatio(MostPulses());
-        if (summedDb < SummedSnrFloorDb)
+        if (summedDb < LookExplainer.SummedSnrFloorDb)
         {
             return (PassOutcome.TooWeakForLook, $"signal too weak for a look: {snrDb:0.0} dB per pulse at the beam's peak, summed more than 20 dB below one pulse's noise");
         }

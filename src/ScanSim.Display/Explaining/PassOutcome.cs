@@ -18,7 +18,7 @@ public enum PassOutcome
     /// <summary>The signal gave at least even odds; the draw went against it.</summary>
     Chance = 5,
 
-    /// <summary>The signal gave at least even odds; another target in the same cell cancelled it.</summary>
+    /// <summary>The signal gave at least even odds; it was missed in one cell with another target, which may have cancelled it.</summary>
     SharedCell = 6,
 
     /// <summary>A pass with a hit and without a plot.</summary>

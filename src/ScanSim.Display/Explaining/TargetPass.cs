@@ -14,8 +14,11 @@ public sealed record TargetPass
     /// <summary>Null when the target did not exist as the beam passed.</summary>
     public required TruthRow? Truth { get; init; }
 
-    /// <summary>In order of time; one with looks "best", more with "all", none where there was no look.</summary>
+    /// <summary>In order of time; one with looks "best", more with "all", none where there was no look. Without <see cref="SideLooks"/>.</summary>
     public required ImmutableArray<LookExplanation> Looks { get; init; }
+
+    /// <summary>Further looks without a hit, away from the pass by more than half the widest plot: side lobes, all round near the radar.</summary>
+    public required int SideLooks { get; init; }
 
     /// <summary>The strongest detected look, or the strongest if none was detected; null without looks.</summary>
     public required LookExplanation? Best { get; init; }

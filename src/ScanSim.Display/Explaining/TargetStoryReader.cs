@@ -19,12 +19,12 @@ public sealed class TargetStoryReader(Recording recording, Scenario scenario, Lo
     private TargetStory Read(Target target, double fromS, double toS, int? scan)
     {
         var looks = Looks(target.Id, fromS, toS, scan);
-        var plotTimesS = PlotTimesS(target.Id, fromS, toS);
+        var plots = Plots(target.Id, fromS, toS);
         var truth = recording.Truth(fromS, toS)
             .Where(t => IsOf(t.Target, target.Id) && (scan is null || t.Scan == scan))
             .ToDictionary(t => t.Scan);
         var passes = truth.Keys.Union(looks.Keys).Order()
-            .Select(s => PassOf(s, truth.TryGetValue(s, out var row) ? row : null, looks.GetValueOrDefault(s, []), plotTimesS));
+            .Select(s => PassOf(s, truth.TryGetValue(s, out var row) ? row : null, looks.GetValueOrDefault(s, []), plots));
         return new TargetStory { Target = target, FromS = fromS, ToS = toS, Passes = [.. passes] };
     }
 
@@ -47,26 +47,42 @@ public sealed class TargetStoryReader(Recording recording, Scenario scenario, Lo
             .ToDictionary(g => g.Key, g => g.OrderBy(look => look.Row.TimeS).ToList());
     }
 
-    private List<double> PlotTimesS(string id, double fromS, double toS) => recording.Plots(fromS - reachS, toS + reachS)
-        .Where(p => p.Kind == EchoKind.Target && p.Target.Split('+').Contains(id, StringComparer.Ordinal))
-        .Select(p => p.TimeS)
-        .Order()
-        .ToList();
+    /// <summary>The plots that hold the target's echo, by time.</summary>
+    private SortedList<double, string> Plots(string id, double fromS, double toS)
+    {
+        var plots = new SortedList<double, string>();
+        foreach (var plot in recording.Plots(fromS - 2 * reachS, toS + 2 * reachS))
+        {
+            if (plot.Kind == EchoKind.Target && plot.Target.Split('+').Contains(id, StringComparer.Ordinal))
+            {
+                plots.TryAdd(plot.TimeS, plot.Target);
+            }
+        }
 
-    private TargetPass PassOf(int scan, TruthRow? truth, List<LookExplanation> looks, List<double> plotTimesS)
+        return plots;
+    }
+
+    /// <summary>Others in a plot of the target within a time of a pass; null when there is no such plot.</summary>
+    private static string? OthersInPlot(SortedList<double, string> plots, string id, double timeS, double withinS)
+    {
+        var near = plots.Where(p => Math.Abs(p.Key - timeS) <= withinS).Select(p => p.Value).FirstOrDefault();
+        return near is null ? null : string.Join(" and ", near.Split('+').Where(other => !IsOf(other, id)));
+    }
+
+    private TargetPass PassOf(int scan, TruthRow? truth, List<LookExplanation> looks, SortedList<double, string> plots)
     {
         var best = looks.OrderByDescending(l => l.Row.Detected).ThenByDescending(l => l.Row.SnrDb).FirstOrDefault();
         var timeS = truth?.TimeS ?? best!.Row.TimeS;
-        var index = plotTimesS.BinarySearch(timeS - reachS);
-        index = index < 0 ? ~index : index;
-        var hasPlot = index < plotTimesS.Count && plotTimesS[index] <= timeS + reachS;
-        var (outcome, reason) = OutcomeOf(truth, best, hasPlot);
+        var hasPlot = HasPlot(plots, timeS);
+        var (outcome, reason) = OutcomeOf(truth, best, hasPlot, plots);
+        ImmutableArray<LookExplanation> told = [.. looks.Where(l => ReferenceEquals(l, best) || l.Row.Detected || Math.Abs(l.Row.TimeS - timeS) <= reachS)];
         return new TargetPass
         {
             Scan = scan,
             TimeS = timeS,
             Truth = truth,
-            Looks = [.. looks],
+            Looks = told,
+            SideLooks = looks.Count - told.Length,
             Best = best,
             HasPlot = hasPlot,
             Outcome = outcome,
@@ -74,7 +90,7 @@ public sealed class TargetStoryReader(Recording recording, Scenario scenario, Lo
         };
     }
 
-    private (PassOutcome Outcome, string Reason) OutcomeOf(TruthRow? truth, LookExplanation? best, bool hasPlot)
+    private (PassOutcome Outcome, string Reason) OutcomeOf(TruthRow? truth, LookExplanation? best, bool hasPlot, SortedList<double, string> plots)
     {
         if (hasPlot)
         {
@@ -87,15 +103,36 @@ public sealed class TargetStoryReader(Recording recording, Scenario scenario, Lo
             return (noLook.Outcome, noLook.Reason);
         }
 
-        return best!.Row.Detected ? (PassOutcome.HitWithoutPlot, best.Reason + WithoutPlot(truth, best)) : (best.Outcome, best.Reason);
+        return best!.Row.Detected ? (PassOutcome.HitWithoutPlot, best.Reason + WithoutPlot(truth, best, plots)) : (best.Outcome, best.Reason);
     }
 
-    private string WithoutPlot(TruthRow? truth, LookExplanation best)
+    private string WithoutPlot(TruthRow? truth, LookExplanation best, SortedList<double, string> plots)
     {
+        if (truth is not { } row || Math.Abs(best.Row.TimeS - row.TimeS) > reachS)
+        {
+            return ", through a side lobe: no plot where it was";
+        }
+
+        // A plot is no wider than the widest one, so one that holds this echo lies within that.
+        if (OthersInPlot(plots, row.Target, row.TimeS, 2 * reachS) is { Length: > 0 } others)
+        {
+            return $", but its echo went into a plot with {others}, away from where it was";
+        }
+
         var minimum = scenario.Radar.Plots.MinimumHits;
-        return truth is not { } row || Math.Abs(best.Row.TimeS - row.TimeS) > reachS ? ", through a side lobe: no plot where it was"
-            : minimum > 1 ? $", no plot: fewer than the {minimum} hits that make one"
-            : ", no plot where it was";
+        return minimum > 1 ? $", no plot: fewer than the {minimum} hits that make one" : ", no plot where it was";
+    }
+
+    private bool HasPlot(SortedList<double, string> plots, double timeS)
+    {
+        var (low, high) = (0, plots.Count);
+        while (low < high)
+        {
+            var middle = (low + high) / 2;
+            (low, high) = plots.Keys[middle] < timeS - reachS ? (middle + 1, high) : (low, middle);
+        }
+
+        return low < plots.Count && plots.Keys[low] <= timeS + reachS;
     }
 
     private static bool IsOf(string target, string id) => string.Equals(target, id, StringComparison.Ordinal);

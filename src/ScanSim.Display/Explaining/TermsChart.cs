@@ -5,7 +5,7 @@ using SkiaSharp;
 namespace ScanSim.Display.Explaining;
 
 /// <summary>
-/// Losses stacked from the free-space SNR of the nearest look downwards, so that their lower edge is the SNR of each look; the SNR that
+/// Losses stacked from the free-space SNR of the nearest look (or from need, if that look lies below it) downwards, so that their lower edge is the SNR of each look; the SNR that
 /// was needed as dashed lines; misses marked on the SNR; a strip with the outcome of each pass.
 /// </summary>
 internal sealed class TermsChart(Sheet sheet, TargetStory story, ChartData data, DateTimeOffset startUtc, RangeUnit unit)
@@ -160,6 +160,6 @@ internal sealed class TermsChart(Sheet sheet, TargetStory story, ChartData data,
             sheet.Fill(boxes, sheet.Colours.Outcomes[(int)group.Key]);
         }
 
-        sheet.Text("each pass", Strip.Right + 6, Strip.Bottom - 3, TextStyle.Small, sheet.Colours.Quiet);
+        sheet.Text(data.EachLook ? "each look" : "each pass", Strip.Right + 6, Strip.Bottom - 3, TextStyle.Small, sheet.Colours.Quiet);
     }
 }
