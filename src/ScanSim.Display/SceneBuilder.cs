@@ -15,6 +15,12 @@ public sealed class SceneBuilder : IRecordingSink
     private bool anyLooks;
 
     public SceneBuilder(Scenario scenario)
+        : this(scenario, 0)
+    {
+    }
+
+    /// <summary>The same with room for a known number of scans.</summary>
+    internal SceneBuilder(Scenario scenario, int scans)
     {
         this.scenario = scenario;
         var beamRadPerS = scenario.Radar.Scan switch
@@ -25,7 +31,7 @@ public sealed class SceneBuilder : IRecordingSink
         };
         foreach (var target in scenario.Targets)
         {
-            gatherings.Add(target.Id, new TargetGathering(target, 0.5 * scenario.Radar.Plots.MaximumWidthRad / beamRadPerS));
+            gatherings.Add(target.Id, new TargetGathering(target, 0.5 * scenario.Radar.Plots.MaximumWidthRad / beamRadPerS, scans));
         }
     }
 

@@ -16,7 +16,7 @@ public static class SceneReader
         Load(recording, ScenarioFile.Parse(recording.ScenarioText, "scenario.json of the recording"), plotsFromS, plotsToS);
 
     /// <summary>The whole timeline and no plot.</summary>
-    internal static Scene LoadWithoutPlots(Recording recording, Scenario scenario) => Load(recording, new SceneBuilder(scenario), builder =>
+    internal static Scene LoadWithoutPlots(Recording recording, Scenario scenario) => Load(recording, new SceneBuilder(scenario, ScansOf(recording)), builder =>
     {
         foreach (var row in recording.PlotSummaries())
         {
@@ -26,13 +26,16 @@ public static class SceneReader
 
     /// <summary>The same with a scenario that was read before.</summary>
     public static Scene Load(Recording recording, Scenario scenario, double plotsFromS, double plotsToS) =>
-        Load(recording, new SceneBuilder(scenario) { PlotsFromS = plotsFromS, PlotsToS = plotsToS }, builder =>
+        Load(recording, new SceneBuilder(scenario, ScansOf(recording)) { PlotsFromS = plotsFromS, PlotsToS = plotsToS }, builder =>
         {
             foreach (var row in recording.Plots())
             {
                 builder.AddPlots(new ReadOnlySpan<PlotRow>(in row));
             }
         });
+
+    /// <summary>For room only: a manifest that lies costs memory, so not more than a day's worth at a scan a second.</summary>
+    private static int ScansOf(Recording recording) => (int)Math.Clamp(recording.Tables["scans"].Rows, 0, 86_400);
 
     private static Scene Load(Recording recording, SceneBuilder builder, Action<SceneBuilder> addPlots)
     {

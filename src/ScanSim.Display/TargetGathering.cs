@@ -6,11 +6,12 @@ namespace ScanSim.Display;
 
 /// <summary>The rows of one target while a scene is gathered.</summary>
 /// <param name="target">The target.</param>
+/// <param name="scans">Rows expected of each table: exact room saves copies of everything.</param>
 /// <param name="reachS">A plot belongs to the pass that is no further away in time; echoes through side lobes belong to none.</param>
-internal sealed class TargetGathering(Target target, double reachS)
+internal sealed class TargetGathering(Target target, double reachS, int scans)
 {
-    private readonly List<TruthMark> truth = [];
-    private readonly List<LookMark> looks = [];
+    private readonly ImmutableArray<TruthMark>.Builder truth = ImmutableArray.CreateBuilder<TruthMark>(scans);
+    private readonly List<LookMark> looks = new(scans);
     private readonly List<double> plotTimesS = [];
 
     public void Add(in TruthSummary row)
@@ -71,7 +72,7 @@ internal sealed class TargetGathering(Target target, double reachS)
         {
             Id = target.Id,
             Class = target.Class,
-            Truth = [.. truth],
+            Truth = truth.ToImmutable(),
             Looks = marks.DrainToImmutable(),
             ScansInView = inView,
             ScansWithPlot = withPlot,

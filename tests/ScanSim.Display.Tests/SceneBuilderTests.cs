@@ -113,4 +113,20 @@ public sealed class SceneBuilderTests
         Assert.Equal([6, 8.5], scene.Plots.Select(p => p.TimeS));
         Assert.Equal(1, scene.Targets[0].BlipScanRatio);
     }
+
+    [Fact]
+    public void A_scene_can_be_built_while_rows_still_come()
+    {
+        builder.AddTruth([.. Enumerable.Range(0, 4).Select(s => SceneMaking.TruthRow(first, s, 2.5 * s + 1, 1000, 0))]);
+        Assert.Equal(4, builder.Build().Targets[0].Truth.Length);
+        builder.AddTruth([SceneMaking.TruthRow(first, 4, 11, 1000, 0)]);
+        Assert.Equal(5, builder.Build().Targets[0].Truth.Length);
+    }
+
+    [Fact]
+    public void Looks_are_gathered_by_scan_whatever_order_they_come_in()
+    {
+        builder.AddLooks([.. ((int[])[3, 1, 4, 1, 0]).Select((scan, i) => SceneMaking.LookRow(first, scan, 2.5 * scan + 1, 10 + i, true, LossReason.None))]);
+        Assert.Equal([(0, 14f), (1, 13f), (3, 10f), (4, 12f)], builder.Build().Targets[0].Looks.Select(l => (l.Scan, l.SnrDb)));
+    }
 }

@@ -46,8 +46,13 @@ public sealed class ReplayRecording
         return Open(folder, opened, ScenarioFile.Parse(opened.ScenarioText, "scenario.json of the recording"));
     }
 
-    internal static ReplayRecording Open(string folder, Recording recording, Scenario scenario) =>
-        new(recording, scenario, SceneReader.LoadWithoutPlots(recording, scenario), Path.GetFileName(Path.TrimEndingDirectorySeparator(Path.GetFullPath(folder))));
+    internal static ReplayRecording Open(string folder, Recording recording, Scenario scenario)
+    {
+        var scene = SceneReader.LoadWithoutPlots(recording, scenario);
+        // Of some ten bytes that reading allocates one is kept; left to itself the collector waits until the rest is several hundred megabytes.
+        GC.Collect(GC.MaxGeneration, GCCollectionMode.Aggressive, blocking: true, compacting: true);
+        return new(recording, scenario, scene, Path.GetFileName(Path.TrimEndingDirectorySeparator(Path.GetFullPath(folder))));
+    }
 
     public int IndexOf(string id)
     {
@@ -71,9 +76,17 @@ public sealed class ReplayRecording
             var (sin, cos) = Math.SinCos(row.BeamAzimuthDeg * (Math.PI / 180));
             return new HitMark(row.TimeS, (float)(row.RangeM * sin), (float)(row.RangeM * cos), row.Kind);
         }).OrderBy(hit => hit.TimeS);
-        return new ReplayStretch(fromS, toS, [.. plots], [.. hits]);
+        return Lean(new ReplayStretch(fromS, toS, [.. plots], [.. hits]));
     }
 
     /// <summary>Reads one target's looks, in order of time.</summary>
-    public ImmutableArray<LookRow> ReadLooks(string id, double fromS, double toS) => [.. recording.LooksOf(id, fromS, toS).OrderBy(look => look.TimeS)];
+    public ImmutableArray<LookRow> ReadLooks(string id, double fromS, double toS) =>
+        Lean(recording.LooksOf(id, fromS, toS).OrderBy(look => look.TimeS).ToImmutableArray());
+
+    /// <summary>Has the collector clear up after a read, beside the painting.</summary>
+    private static T Lean<T>(T read)
+    {
+        GC.Collect(GC.MaxGeneration, GCCollectionMode.Forced, blocking: false);
+        return read;
+    }
 }

@@ -25,6 +25,9 @@ public sealed class ReplayGallery
                 Save(screen, 1280, 800, Path.Combine(folder!, $"{recording.Name}-{theme}-selected.png"));
                 screen.Press(ReplayMaking.Typed('a'), ReplayMaking.Typed('n'));
                 Save(screen, 1920, 1080, Path.Combine(folder!, $"{recording.Name}-{theme}-large.png"));
+                screen.Press(ReplayMaking.Typed('l'), ReplayMaking.Key(WindowKey.Right, shift: true), ReplayMaking.Key(WindowKey.Right, shift: true), ReplayMaking.Typed('l'));
+                HoverOverNewestPlot(screen);
+                Save(screen, 800, 600, Path.Combine(folder!, $"{recording.Name}-{theme}-small.png"));
                 screen.Press(ReplayMaking.Typed('?'));
                 Save(screen, 1280, 800, Path.Combine(folder!, $"{recording.Name}-{theme}-help.png"));
             }
@@ -36,6 +39,18 @@ public sealed class ReplayGallery
             Save(both, 1280, 800, Path.Combine(folder!, "both.png"));
             both.Press(ReplayMaking.Key(WindowKey.Tab), ReplayMaking.Typed('x'), ReplayMaking.Typed('x'), ReplayMaking.Typed('x'), ReplayMaking.Typed('x'), ReplayMaking.Typed('x'), ReplayMaking.Typed('.'), ReplayMaking.Typed('.'), ReplayMaking.Typed('.'));
             Save(both, 1280, 800, Path.Combine(folder!, "both-selected.png"));
+        }
+    }
+
+    private static void HoverOverNewestPlot(ReplayScreen screen)
+    {
+        screen.Handle(new WindowEvent { Kind = WindowEventKind.Resized, X = 800, Y = 600, Scale = 1 });
+        screen.WaitForRows();
+        var plan = ReplayLayout.Of(800, 600, screen.World).Plans[0];
+        if (ReplayPick.Shown(screen.State, screen.World, 0) is { IsEmpty: false } plots)
+        {
+            var place = ReplayMoves.Projection(screen.State, screen.World, plan).ToPlan(plots[^1].EastM, plots[^1].NorthM);
+            screen.Press(ReplayMaking.Pointer(WindowEventKind.PointerMoved, place.X, place.Y));
         }
     }
 

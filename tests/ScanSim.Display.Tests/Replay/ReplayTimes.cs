@@ -16,15 +16,16 @@ public sealed class ReplayTimes(ITestOutputHelper output)
         foreach (var folder in recordings!.Split(':'))
         {
             var start = Stopwatch.GetTimestamp();
+            var cpu = Process.GetCurrentProcess().TotalProcessorTime;
             var recording = ReplayRecording.Open(folder);
             var openedMs = Stopwatch.GetElapsedTime(start).TotalMilliseconds;
-            output.WriteLine($"{recording.Name}: opened in {openedMs:0} ms, {Process.GetCurrentProcess().WorkingSet64 >> 20} MB of memory in use");
+            output.WriteLine($"{recording.Name}: opened in {openedMs:0} ms ({(Process.GetCurrentProcess().TotalProcessorTime - cpu).TotalMilliseconds:0} ms of processor), {Process.GetCurrentProcess().WorkingSet64 >> 20} MB of memory in use, {GC.GetTotalAllocatedBytes() >> 20} MB allocated, {GC.GetTotalMemory(false) >> 20} MB on the heap");
             foreach (var (speed, isSelected, isShort) in ((double, bool, bool)[])[(1, false, false), (1, true, true), (16, true, false), (64, false, true)])
             {
                 Print(recording, speed, isSelected, isShort);
             }
 
-            output.WriteLine($"{Process.GetCurrentProcess().PeakWorkingSet64 >> 20} MB at the most");
+            output.WriteLine($"{Process.GetCurrentProcess().PeakWorkingSet64 >> 20} MB at the most, {GC.GetTotalAllocatedBytes() >> 20} MB allocated, {GC.GetTotalMemory(true) >> 20} MB are needed");
         }
     }
 
@@ -45,6 +46,8 @@ public sealed class ReplayTimes(ITestOutputHelper output)
         screen.WaitForRows();
         using var surface = SKSurface.Create(new SKImageInfo(1280, 800, SKImageInfo.PlatformColorType, SKAlphaType.Premul));
         var times = new List<double>();
+        var cpu = Process.GetCurrentProcess().TotalProcessorTime;
+        var allocated = GC.GetTotalAllocatedBytes();
         for (var frame = 0; frame < 220; frame++)
         {
             var start = Stopwatch.GetTimestamp();
@@ -53,8 +56,10 @@ public sealed class ReplayTimes(ITestOutputHelper output)
             times.Add(Stopwatch.GetElapsedTime(start).TotalMilliseconds);
         }
 
+        var cpuMs = (Process.GetCurrentProcess().TotalProcessorTime - cpu).TotalMilliseconds / times.Count;
+        allocated = GC.GetTotalAllocatedBytes() - allocated;
         var settled = times.Skip(20).Order().ToList();
-        output.WriteLine($"  speed {speedRatio}, {(isSelected ? "one selected" : "none selected")}, timeline {(isShort ? "zoomed" : "whole")}: p50 {settled[100]:0.0} ms, p99 {settled[197]:0.0} ms; {string.Join(", ", screen.Painter.Counts())}");
+        output.WriteLine($"  speed {speedRatio}, {(isSelected ? "one selected" : "none selected")}, timeline {(isShort ? "zoomed" : "whole")}: p50 {settled[100]:0.0} ms, p99 {settled[197]:0.0} ms, {cpuMs:0.0} ms of processor a frame; {allocated / 220 >> 10} KB allocated a frame; {string.Join(", ", screen.Painter.Counts())}");
         Assert.True(times[0] > 0);
     }
 }
