@@ -79,6 +79,7 @@ internal sealed class LookRows(RunSetup setup)
         var elevationDb = Decibels.FromRatio(look.ElevationBeamRatio);
         var eclipsingDb = Decibels.FromRatio(look.EclipsingRatio);
         var spreadingDb = -4 * Decibels.FromRatio(look.RangeM);
+        var pd = ProbabilityOf(target, detector, found, dwell, state);
         var perPulse = target.Fluctuation is FluctuationCase.Case2 or FluctuationCase.Case4;
         return new LookRow
         {
@@ -99,11 +100,11 @@ internal sealed class LookRows(RunSetup setup)
             ElevationBeamDb = elevationDb,
             EclipsingDb = eclipsingDb,
             SnrDb = radarDb + target.RcsDb + spreadingDb + azimuthDb + elevationDb + eclipsingDb,
-            Pd = ProbabilityOf(target, detector, found, dwell, state),
+            Pd = pd,
             FluctuationDb = perPulse ? null : Decibels.FromRatio(found.FluctuationRatio),
             StatisticDb = Decibels.FromRatio(found.Statistic / detector.Threshold),
             Detected = found.Detected,
-            LostTo = ReasonOf(target, detector, found, centredBeamRatio[dwell.PrfIndex]),
+            LostTo = ReasonOf(found, pd, detector.EvenOddsSnrRatio(target.Fluctuation), centredBeamRatio[dwell.PrfIndex]),
             TargetsInCell = found.TargetsInCell,
         };
     }
@@ -120,7 +121,7 @@ internal sealed class LookRows(RunSetup setup)
         return detector.Probability(target.Fluctuation, found.Look.SnrRatio, pulses);
     }
 
-    private static LossReason ReasonOf(RunTarget target, Detector detector, in FoundLook found, double centredRatio)
+    private static LossReason ReasonOf(in FoundLook found, double pd, double needed, double centredRatio)
     {
         if (found.Detected)
         {
@@ -128,8 +129,7 @@ internal sealed class LookRows(RunSetup setup)
         }
 
         ref readonly var look = ref found.Look;
-        var needed = detector.EvenOddsSnrRatio(target.Fluctuation);
-        if (look.SnrRatio >= needed)
+        if (pd >= 0.5)
         {
             return found.TargetsInCell > 1 ? LossReason.SharedCell : LossReason.Fluctuation;
         }
