@@ -74,7 +74,7 @@ internal sealed class TargetLookPanel(
     {
         var row = explained.Row;
         column.Figures("Pd", $"{row.Pd:0.000}", "margin", BudgetBars.Db(explained.MarginDb));
-        column.Figures("RCS draw", row.FluctuationDb is { } db ? BudgetBars.Db(db) : "each pulse", "statistic", BudgetBars.Db(row.StatisticDb));
+        column.Figures("RCS draw", row.FluctuationDb is { } db ? BudgetBars.Db(db) : "–", "statistic", BudgetBars.Db(row.StatisticDb));
     }
 
     private void PaintCharts(LookExplanation? explained)

@@ -16,24 +16,25 @@ internal sealed class TimelineHeading(Sheet sheet, ReplayState state, ReplayWorl
         var part = world.Rows.Length > layout.RowsFitting ? $" {state.FirstRow + 1}–{state.FirstRow + layout.RowsFitting} of {world.Rows.Length}" : "";
         sheet.Text($"rows{part} by {OrderText(state.Order)}", order.Right, area.Top + 17, TextStyle.Small, sheet.Colours.Ink, SKTextAlign.Right);
         sheet.Text(world.IsComparison ? "blip/scan %" : "blip/scan", area.Right - 14, layout.Rows.Top - 4, TextStyle.Small, sheet.Colours.Quiet, SKTextAlign.Right);
-        var x = area.Left + 16 + sheet.Width("Scan timeline", TextStyle.Strong) + 24;
+        var start = area.Left + 16 + sheet.Width("Scan timeline", TextStyle.Strong) + 24;
+        var (x, y, end) = (start, area.Top + 17, order.Left);
         var inColumns = RowPainter.IsInColumns(layout.Rows.Width, state.TimelineToS - state.TimelineFromS, world.Recordings.Max(r => r.Scene.Beam.PeriodS));
         foreach (var (text, paint) in Entries(inColumns))
         {
             var needed = SwatchWidth + sheet.Width(text, TextStyle.Small) + 16;
-            if (x + needed > order.Left)
+            if (x + needed > end)
             {
-                break;
+                (x, y, end) = (start, area.Top + 33, area.Right);
             }
 
-            paint(new SKPoint(x + 7, area.Top + 13));
-            sheet.Text(text, x + SwatchWidth, area.Top + 17, TextStyle.Small, sheet.Colours.Quiet);
+            paint(new SKPoint(x + 7, y - 4));
+            sheet.Text(text, x + SwatchWidth, y, TextStyle.Small, sheet.Colours.Quiet);
             x += needed;
         }
 
         if (!world.IsComparison && !inColumns)
         {
-            PaintShades(area.Left + 16 + sheet.Width("Scan timeline", TextStyle.Strong) + 24, area.Top + 33);
+            PaintShades(y > area.Top + 20 ? x : start, area.Top + 33);
         }
     }
 
@@ -80,8 +81,13 @@ internal sealed class TimelineHeading(Sheet sheet, ReplayState state, ReplayWorl
     private void PaintShades(float left, float baseline)
     {
         var shades = world.First.Shades;
-        var x = sheet.Text("SNR", left, baseline, TextStyle.Small, sheet.Colours.Quiet) + 10;
         string[] texts = [$"below {shades.LowDb:0}", $"{shades.LowDb:0} to {shades.MiddleDb:0}", $"{shades.MiddleDb:0} to {shades.HighDb:0}", $"above {shades.HighDb:0} dB"];
+        if (left + sheet.Width("SNR" + string.Concat(texts), TextStyle.Small) + 10 + 28 * texts.Length > layout.Timeline.Right)
+        {
+            return;
+        }
+
+        var x = sheet.Text("SNR", left, baseline, TextStyle.Small, sheet.Colours.Quiet) + 10;
         for (var shade = 0; shade < SnrShades.Count; shade++)
         {
             Glyphs.Outcomes(sheet, LookOutcome.Detected, [new SKPoint(x + 5, baseline - 4)], 4.5f, SnrShades.Alpha(shade));
