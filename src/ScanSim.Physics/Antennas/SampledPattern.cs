@@ -1,3 +1,5 @@
+using System.Runtime.CompilerServices;
+
 namespace ScanSim.Physics.Antennas;
 
 /// <summary>A pattern as uniform samples over [−π, π], with a floor: what the run itself evaluates.</summary>
@@ -43,6 +45,7 @@ public sealed class SampledPattern
     public double StepRad { get; }
 
     /// <summary>One-way power relative to the peak. The offset is wrapped to [−π, π] already; outside it the call throws.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public double GainRatio(double offsetRad)
     {
         double position = offsetRad * stepsPerRad + centre;

@@ -1,3 +1,5 @@
+using System.Runtime.CompilerServices;
+
 namespace ScanSim.Physics.Earth;
 
 /// <summary>A sphere of k times the earth's radius on which rays run straight.</summary>
@@ -28,6 +30,7 @@ public readonly record struct EffectiveEarth(double RadiusM)
     }
 
     /// <summary>Sine and cosine: below 0.05 rad (850 km on the 4/3 earth) by their series, whose first omitted terms are below 2⁻⁵³ there.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     private static (double Sine, double Cosine) HalfAngle(double angleRad)
     {
         if (!(angleRad < 0.05))
@@ -36,8 +39,8 @@ public readonly record struct EffectiveEarth(double RadiusM)
         }
 
         double x2 = angleRad * angleRad;
-        double sine = angleRad * (1.0 - x2 / 6.0 * (1.0 - x2 / 20.0 * (1.0 - x2 / 42.0 * (1.0 - x2 / 72.0))));
-        double cosine = 1.0 - x2 / 2.0 * (1.0 - x2 / 12.0 * (1.0 - x2 / 30.0 * (1.0 - x2 / 56.0)));
+        double sine = angleRad * (1.0 - x2 * (1.0 / 6 - x2 * (1.0 / 120 - x2 * (1.0 / 5040 - x2 * (1.0 / 362880)))));
+        double cosine = 1.0 - x2 * (1.0 / 2 - x2 * (1.0 / 24 - x2 * (1.0 / 720 - x2 * (1.0 / 40320))));
         return (sine, cosine);
     }
 
