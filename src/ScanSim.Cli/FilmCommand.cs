@@ -52,8 +52,10 @@ internal static class FilmCommand
             };
             // Reading a long recording takes a while: what is wrong with the options is said before.
             Film.Check(plan, recording.Head.DurationS, parsed.GetValue(output)!);
-            var scene = SceneReader.Load(recording);
-            ProgressBar.Around("frames", report => Film.Save(scene, drawn.View(parsed), plan, parsed.GetValue(output)!, report, interruption.Token));
+            var scenario = ScenarioFile.Parse(recording.ScenarioText, ViewArguments.ScenarioName);
+            var view = drawn.View(parsed, scenario.Site);
+            var scene = SceneReader.Load(recording, scenario, double.NegativeInfinity, double.PositiveInfinity);
+            ProgressBar.Around("frames", report => Film.Save(scene, view, plan, parsed.GetValue(output)!, report, interruption.Token));
             return ExitCode.Done;
         });
         return (command, "scansim film out -o harbour.webp\nscansim film out --from \"2 min\" --to \"4 min\" --speed 5 --range \"6 km\" -o harbour.gif\nscansim film out --speed 30 --fps 25 --size 1920x1080 -o harbour.mp4");

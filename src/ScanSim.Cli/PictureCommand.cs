@@ -29,9 +29,11 @@ internal static class PictureCommand
                 throw new InputException(string.Create(CultureInfo.InvariantCulture, $"--at: read {timeS:0.###} s, expected a time within the recording: 0 s to {durationS:0.###} s"));
             }
 
-            Picture.Save(SceneReader.Load(recording), drawn.View(parsed), timeS, drawn.Size(parsed), parsed.GetValue(output)!);
+            var scenario = ScenarioFile.Parse(recording.ScenarioText, ViewArguments.ScenarioName);
+            var view = drawn.View(parsed, scenario.Site);
+            Picture.Save(SceneReader.Load(recording, scenario, double.NegativeInfinity, double.PositiveInfinity), view, timeS, drawn.Size(parsed), parsed.GetValue(output)!);
             return ExitCode.Done;
         });
-        return (command, "scansim picture out --at \"125 s\" -o harbour.png\nscansim picture out --at \"5 min\" -o harbour.pdf --paper --unit nmi");
+        return (command, "scansim picture out --at \"125 s\" -o harbour.png\nscansim picture out --at \"5 min\" -o harbour.pdf --paper --unit nmi --overlay scenarios/harbour-coast.geojson");
     }
 }

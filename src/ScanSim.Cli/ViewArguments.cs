@@ -2,6 +2,7 @@ using System.CommandLine;
 using System.CommandLine.Parsing;
 using System.Globalization;
 using ScanSim.Display;
+using ScanSim.Display.Overlays;
 using ScanSim.Scenarios;
 
 namespace ScanSim.Cli;
@@ -9,6 +10,9 @@ namespace ScanSim.Cli;
 /// <summary>The options that say what part of a recording is drawn, and how: the same for pictures and films.</summary>
 internal sealed class ViewArguments
 {
+    /// <summary>What messages call the scenario in a recording.</summary>
+    public const string ScenarioName = "scenario.json of the recording";
+
     private readonly Option<RangeUnit> unit = ChoiceOption.Create("--unit", "Unit of ranges.", ("km", RangeUnit.Kilometre), ("nmi", RangeUnit.NauticalMile));
     private readonly Option<double?> range = QuantityOption.Create("--range", Dimension.Length, "LENGTH", "Range from the site to the plan's edge [default: the instrumented range].", 10);
     private readonly Option<double?> east = QuantityOption.Create("--east", Dimension.Length, "LENGTH", "Middle of the plan, east of the site [default: 0 m].");
@@ -19,6 +23,7 @@ internal sealed class ViewArguments
     private readonly Option<PictureSize?> size;
     private readonly PictureSize defaultSize;
     private readonly Option<double> scale = new("--scale") { Description = "Draws everything so many times as large.", HelpName = "FACTOR", DefaultValueFactory = _ => 1 };
+    private readonly Option<string[]> overlays = OverlayOption();
     private readonly Option<bool> noTruth = new("--no-truth") { Description = "Leave out where the targets really are." };
 
     private ViewArguments(PictureSize defaultSize)
@@ -30,7 +35,7 @@ internal sealed class ViewArguments
     public static ViewArguments AddTo(Command command, PictureSize defaultSize)
     {
         var arguments = new ViewArguments(defaultSize);
-        foreach (var option in (Option[])[arguments.unit, arguments.range, arguments.east, arguments.north, arguments.paper, arguments.afterglow, arguments.size, arguments.scale, arguments.noTruth])
+        foreach (var option in (Option[])[arguments.unit, arguments.range, arguments.east, arguments.north, arguments.paper, arguments.afterglow, arguments.size, arguments.scale, arguments.overlays, arguments.noTruth])
         {
             command.Add(option);
         }
@@ -38,7 +43,13 @@ internal sealed class ViewArguments
         return arguments;
     }
 
-    public ViewOptions View(ParseResult parsed) => new()
+    public static Option<string[]> OverlayOption() =>
+        new("--overlay") { Description = "Lines and places to draw under the plan, as GeoJSON; may be given again.", HelpName = "FILE.geojson", DefaultValueFactory = _ => [] };
+
+    /// <summary>What the options ask for; overlays are read here.</summary>
+    /// <param name="parsed">The command line.</param>
+    /// <param name="site">The recording's, to which overlays are laid.</param>
+    public ViewOptions View(ParseResult parsed, Site site) => new()
     {
         Unit = parsed.GetValue(unit),
         Theme = parsed.GetValue(paper) ? Theme.Paper : Theme.Dark,
@@ -47,6 +58,7 @@ internal sealed class ViewArguments
         CentreNorthM = parsed.GetValue(north) ?? 0,
         AfterglowScans = parsed.GetValue(afterglow),
         ShowTruth = !parsed.GetValue(noTruth),
+        Overlays = [.. parsed.GetValue(overlays)!.Select(file => Overlay.Load(file, site))],
     };
 
     public PictureSize Size(ParseResult parsed) => (parsed.GetValue(size) ?? defaultSize) with { Scale = parsed.GetValue(scale) };

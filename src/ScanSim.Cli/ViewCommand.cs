@@ -27,7 +27,7 @@ internal static class ViewCommand
         var target = new Option<string?>("--target") { Description = "Target selected at first.", HelpName = "ID" };
         var unit = ChoiceOption.Create("--unit", "Unit of ranges.", ("km", RangeUnit.Kilometre), ("nmi", RangeUnit.NauticalMile));
         var paper = new Option<bool>("--paper") { Description = "Dark on white." };
-        var overlays = new Option<string[]>("--overlay") { Description = "Lines and places to draw under the plan, as GeoJSON; may be given again.", HelpName = "FILE.geojson", DefaultValueFactory = _ => [] };
+        var overlays = ViewArguments.OverlayOption();
         var size = new Option<(int Width, int Height)>("--size") { Description = "Size of the window in pixels at scale 1 [default: 1280x800].", HelpName = "WxH", CustomParser = ParseSize, DefaultValueFactory = _ => Usual };
         var scale = Factor("--scale", "Draws everything so many times as large, from 1 to 8 [default: as the screen asks].", 1, 8);
         var measure = QuantityOption.Create("--measure", Dimension.Time, "TIME", "Plays for so long, prints how long the frames took, and closes.", 0, above: true);

@@ -1,3 +1,6 @@
+using System.Collections.Immutable;
+using ScanSim.Display.Overlays;
+
 namespace ScanSim.Display;
 
 /// <summary>What part of a scene is shown and how; the defaults show the whole instrumented range on a dark ground.</summary>
@@ -26,6 +29,9 @@ public sealed record ViewOptions
     public bool ShowLabels { get; init; } = true;
 
     public bool ShowFalsePlots { get; init; } = true;
+
+    /// <summary>Coastlines, zones and places under the plan.</summary>
+    public ImmutableArray<Overlay> Overlays { get; init; } = [];
 
     /// <summary>Throws <see cref="PictureException"/> when a value cannot be drawn.</summary>
     public void Check()

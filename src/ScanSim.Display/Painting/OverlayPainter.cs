@@ -7,7 +7,7 @@ namespace ScanSim.Display.Painting;
 /// <summary>Coastlines, zones and places under the plan: areas faintly filled, lines quiet, so that echoes stand out.</summary>
 internal static class OverlayPainter
 {
-    public static void Paint(Sheet sheet, PlanProjection plan, ImmutableArray<Overlay> overlays)
+    public static void Paint(Sheet sheet, PlanProjection plan, ImmutableArray<Overlay> overlays, ImmutableArray<OverlayName> names)
     {
         using var open = new SKPath();
         using var closed = new SKPath { FillType = SKPathFillType.EvenOdd };
@@ -19,19 +19,43 @@ internal static class OverlayPainter
         sheet.Fill(closed, sheet.Colours.Trail.WithAlpha(0x20));
         sheet.Outline(closed, 1.2f, sheet.Colours.Trail.WithAlpha(0xC0));
         sheet.Outline(open, 1.2f, sheet.Colours.Trail.WithAlpha(0xC0));
-        var names = new List<SKRect>();
         foreach (var point in overlays.SelectMany(overlay => overlay.Points))
         {
             PaintPoint(sheet, plan.ToPlan(point.Place.EastM, point.Place.NorthM));
-            PaintName(sheet, plan.Area, plan.ToPlan(point.Place.EastM, point.Place.NorthM), point.Name, names);
         }
 
-        foreach (var line in overlays.SelectMany(overlay => overlay.Lines))
+        foreach (var name in names)
         {
-            // At a vertex in the middle of the line: its ends are often where the map was cut.
-            var at = line.Vertices[line.Vertices.Length / 2];
-            PaintName(sheet, plan.Area, plan.ToPlan(at.EastM, at.NorthM), line.Name, names);
+            sheet.Text(name.Text, name.Box.Left + 2, name.Box.Bottom - 3, TextStyle.Small, sheet.Colours.GridText);
         }
+    }
+
+    /// <summary>Places for the names that find one clear of what is taken and of each other: right, left, above or below; the rest is left out.</summary>
+    public static ImmutableArray<OverlayName> Names(Sheet sheet, PlanProjection plan, ImmutableArray<Overlay> overlays, IEnumerable<SKRect> taken)
+    {
+        var points = overlays.SelectMany(overlay => overlay.Points).Select(point => (point.Name, plan.ToPlan(point.Place.EastM, point.Place.NorthM)));
+
+        // A line's name stands at a vertex in its middle: its ends are often where the map was cut.
+        var lines = overlays.SelectMany(overlay => overlay.Lines)
+            .Select(line => (line.Name, plan.ToPlan(line.Vertices[line.Vertices.Length / 2].EastM, line.Vertices[line.Vertices.Length / 2].NorthM)));
+        var obstacles = taken.ToList();
+        var names = ImmutableArray.CreateBuilder<OverlayName>();
+        foreach (var (text, place) in points.Concat(lines).Where(named => named.Name.Length > 0))
+        {
+            var width = sheet.Width(text, TextStyle.Small) + 4;
+            foreach (var (left, top) in (ReadOnlySpan<(float, float)>)[(5, -7), (-5 - width, -7), (-width / 2, -20), (-width / 2, 6)])
+            {
+                var box = SKRect.Create(place.X + left, place.Y + top, width, 14);
+                if (plan.Area.Contains(box) && !obstacles.Exists(other => other.IntersectsWith(box)))
+                {
+                    obstacles.Add(box);
+                    names.Add(new OverlayName(text, box));
+                    break;
+                }
+            }
+        }
+
+        return names.ToImmutable();
     }
 
     private static void Add(SKPath path, PlanProjection plan, OverlayLine line)
@@ -52,18 +76,5 @@ internal static class OverlayPainter
     {
         sheet.Line(new SKPoint(place.X - 3.5f, place.Y - 3.5f), new SKPoint(place.X + 3.5f, place.Y + 3.5f), 1.2f, sheet.Colours.Quiet);
         sheet.Line(new SKPoint(place.X - 3.5f, place.Y + 3.5f), new SKPoint(place.X + 3.5f, place.Y - 3.5f), 1.2f, sheet.Colours.Quiet);
-    }
-
-    /// <summary>Names that would touch one another or the edge are left out.</summary>
-    private static void PaintName(Sheet sheet, SKRect area, SKPoint place, string name, List<SKRect> taken)
-    {
-        var box = SKRect.Create(place.X + 6, place.Y - 7, sheet.Width(name, TextStyle.Small), 14);
-        if (name.Length == 0 || !area.Contains(box) || taken.Exists(other => other.IntersectsWith(box)))
-        {
-            return;
-        }
-
-        taken.Add(box);
-        sheet.Text(name, box.Left, box.Bottom - 3, TextStyle.Small, sheet.Colours.GridText);
     }
 }

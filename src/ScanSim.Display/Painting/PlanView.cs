@@ -1,3 +1,4 @@
+using System.Collections.Immutable;
 using SkiaSharp;
 
 namespace ScanSim.Display.Painting;
@@ -18,6 +19,8 @@ internal static class PlanView
         var targets = view.ShowTruth ? marks.TargetsNow() : [];
         var furniture = new PlanFurniture(sheet, plan, scene.SiteName, view.Unit, targets);
         var grid = new PlanGrid(sheet, plan, scene.InstrumentedRangeM, view.RangeM ?? scene.InstrumentedRangeM, view.Unit, [.. furniture.Boxes, CountBox(area)], [.. targets.Select(t => t.Position)]);
+        var names = OverlayPainter.Names(sheet, plan, view.Overlays, Taken(targets, grid, furniture, area));
+        OverlayPainter.Paint(sheet, plan, view.Overlays, names);
         marks.PaintBlanked();
         grid.PaintLines();
         if (view.ShowTruth)
@@ -31,7 +34,7 @@ internal static class PlanView
         var plots = marks.PaintPlots();
         if (view.ShowLabels)
         {
-            PaintLabels(sheet, area, LabelsOf(sheet, area, targets, grid, furniture, plots));
+            PaintLabels(sheet, area, LabelsOf(sheet, area, targets, grid, furniture, plots, names));
         }
 
         furniture.Paint();
@@ -39,15 +42,24 @@ internal static class PlanView
     }
 
     public static LabelLayout LabelsOf(
-        Sheet sheet, SKRect area, IReadOnlyList<TargetNow> targets, PlanGrid grid, PlanFurniture furniture, IEnumerable<SKPoint> plots)
+        Sheet sheet, SKRect area, IReadOnlyList<TargetNow> targets, PlanGrid grid, PlanFurniture furniture, IEnumerable<SKPoint> plots, ImmutableArray<OverlayName> names)
     {
         var requests = targets
             .Select(t => new LabelRequest(t.Target.Id, t.Position, new SKSize(sheet.Width(t.Target.Id, TextStyle.Small) + 4, 14), !t.IsInView))
             .ToList();
-        List<SKRect> obstacles = [.. furniture.Boxes, .. grid.Labels.Select(l => l.Box), CountBox(area)];
+        List<SKRect> obstacles = [.. furniture.Boxes, .. grid.Labels.Select(l => l.Box), .. names.Select(n => n.Box), CountBox(area)];
         var courses = targets.SelectMany(t => CourseMarks(t));
         return LabelPlacer.Place(requests, SKRect.Inflate(area, -4, -4), obstacles, plots.Concat(courses));
     }
+
+    /// <summary>What names of an overlay keep clear of: all that is set before them, and the targets' symbols.</summary>
+    public static IEnumerable<SKRect> Taken(IEnumerable<TargetNow> targets, PlanGrid grid, PlanFurniture furniture, SKRect area) =>
+    [
+        .. furniture.Boxes,
+        .. grid.Labels.Select(l => l.Box),
+        .. targets.Select(t => SKRect.Create(t.Position.X - Glyphs.TruthRadius - 2, t.Position.Y - Glyphs.TruthRadius - 2, 2 * Glyphs.TruthRadius + 4, 2 * Glyphs.TruthRadius + 4)),
+        CountBox(area),
+    ];
 
     /// <summary>Two marks along the course stroke: a label prefers the other sides.</summary>
     private static IEnumerable<SKPoint> CourseMarks(TargetNow target)

@@ -1,3 +1,4 @@
+using System.Collections.Immutable;
 using ScanSim.Display.Painting;
 using SkiaSharp;
 
@@ -17,12 +18,12 @@ internal sealed class LabelKeeper
     public int Layouts { get; private set; }
 
     public void Paint(
-        Sheet sheet, SKRect area, IReadOnlyList<TargetNow> targets, PlanGrid grid, PlanFurniture furniture, List<SKPoint> plots, PlanProjection plan)
+        Sheet sheet, SKRect area, IReadOnlyList<TargetNow> targets, PlanGrid grid, PlanFurniture furniture, List<SKPoint> plots, PlanProjection plan, ImmutableArray<OverlayName> names)
     {
-        var key = (area, plan.CentreEastM, plan.CentreNorthM, plan.MetresPerPx, plan.UpRad, targets.Count, grid.Labels.Count);
+        var key = (area, plan.CentreEastM, plan.CentreNorthM, plan.MetresPerPx, plan.UpRad, targets.Count, grid.Labels.Count, names.Length);
         if (layout is null || !key.Equals(laidOutFor) || HasMoved(targets))
         {
-            layout = PlanView.LabelsOf(sheet, area, targets, grid, furniture, plots);
+            layout = PlanView.LabelsOf(sheet, area, targets, grid, furniture, plots, names);
             laidOutFor = key;
             Layouts++;
             anchors.Clear();

@@ -14,7 +14,7 @@ internal sealed class ReplayPlan : IDisposable
 
     private readonly Layer ground = new();
     private readonly LabelKeeper labels = new();
-    private (PlanFurniture Furniture, PlanGrid Grid)? kept;
+    private (PlanFurniture Furniture, PlanGrid Grid, ImmutableArray<OverlayName> Names)? kept;
     private object? keptFor;
 
     public int Renewals => ground.Renewals;
@@ -28,9 +28,9 @@ internal sealed class ReplayPlan : IDisposable
         var projection = ReplayMoves.Projection(state, world, area);
         var view = ViewOf(state, world);
         var trailS = state is { ShowTrails: true, ShowTruth: true } ? TrailTimeS(scene, state.TimeS) : double.NaN;
-        var (furniture, grid) = GridOf(sheet, state, world, scene, projection);
+        var (furniture, grid, names) = GridOf(sheet, state, world, scene, projection);
         var key = (state.CentreEastM, state.CentreNorthM, state.RangeM, state.UpRad, state.Unit, state.Theme, state.ShowOverlays, trailS);
-        ground.Show(frame, area, key, canvas => PaintGround(frame.SheetOn(canvas, sheet.Colours), area, projection, furniture, grid, scene, view, trailS, state.ShowOverlays ? world.Overlays : []));
+        ground.Show(frame, area, key, canvas => PaintGround(frame.SheetOn(canvas, sheet.Colours), area, projection, furniture, grid, scene, view, trailS, state.ShowOverlays ? world.Overlays : [], names));
 
         sheet.Canvas.Save();
         sheet.Canvas.ClipRect(area);
@@ -47,7 +47,7 @@ internal sealed class ReplayPlan : IDisposable
         PaintSelection(sheet, targets, state);
         if (state.ShowLabels)
         {
-            labels.Paint(sheet, area, targets, grid, furniture, plots, projection);
+            labels.Paint(sheet, area, targets, grid, furniture, plots, projection, names);
         }
 
         PaintCaption(sheet, world, recording, state.TimeS, area);
@@ -57,16 +57,18 @@ internal sealed class ReplayPlan : IDisposable
     public void Dispose() => ground.Dispose();
 
     /// <summary>Rings and bearings with their labels. They stay where they are while the view does, though targets pass under the labels.</summary>
-    private (PlanFurniture Furniture, PlanGrid Grid) GridOf(Sheet sheet, ReplayState state, ReplayWorld world, Scene scene, PlanProjection projection)
+    private (PlanFurniture Furniture, PlanGrid Grid, ImmutableArray<OverlayName> Names) GridOf(Sheet sheet, ReplayState state, ReplayWorld world, Scene scene, PlanProjection projection)
     {
-        var key = (projection.Area, state.CentreEastM, state.CentreNorthM, state.RangeM, state.UpRad, state.Unit, state.ShowTruth);
+        var key = (projection.Area, state.CentreEastM, state.CentreNorthM, state.RangeM, state.UpRad, state.Unit, state.ShowTruth, state.ShowOverlays);
         if (kept is not { } grids || !key.Equals(keptFor))
         {
             // The site's name stands in the title: beside the site there is the most traffic.
             var furniture = new PlanFurniture(sheet, projection, "", state.Unit, []);
             var targets = state.ShowTruth ? new PlanMarks(sheet, projection, scene, new ViewOptions(), state.TimeS).TargetsNow() : [];
-            grids = (furniture, new PlanGrid(
-                sheet, projection, scene.InstrumentedRangeM, world.RangeM(state), state.Unit, furniture.Boxes, [.. targets.Select(target => target.Position)]));
+            var grid = new PlanGrid(
+                sheet, projection, scene.InstrumentedRangeM, world.RangeM(state), state.Unit, furniture.Boxes, [.. targets.Select(target => target.Position)]);
+            var names = OverlayPainter.Names(sheet, projection, state.ShowOverlays ? world.Overlays : [], PlanView.Taken(targets, grid, furniture, projection.Area));
+            grids = (furniture, grid, names);
             (kept, keptFor) = (grids, key);
         }
 
@@ -92,12 +94,12 @@ internal sealed class ReplayPlan : IDisposable
         return Math.Floor(timeS / stepS) * stepS;
     }
 
-    private static void PaintGround(Sheet sheet, SKRect area, PlanProjection projection, PlanFurniture furniture, PlanGrid grid, Scene scene, ViewOptions view, double trailS, ImmutableArray<Overlay> overlays)
+    private static void PaintGround(Sheet sheet, SKRect area, PlanProjection projection, PlanFurniture furniture, PlanGrid grid, Scene scene, ViewOptions view, double trailS, ImmutableArray<Overlay> overlays, ImmutableArray<OverlayName> names)
     {
         using (sheet)
         {
             sheet.Rect(area, sheet.Colours.Ground);
-            OverlayPainter.Paint(sheet, projection, overlays);
+            OverlayPainter.Paint(sheet, projection, overlays, names);
             var marks = new PlanMarks(sheet, projection, scene, view, trailS);
             marks.PaintBlanked();
             grid.With(sheet).PaintLines();
