@@ -18,7 +18,7 @@ internal sealed class ViewArguments
     private readonly Option<double?> east = QuantityOption.Create("--east", Dimension.Length, "LENGTH", "Middle of the plan, east of the site [default: 0 m].");
     private readonly Option<double?> north = QuantityOption.Create("--north", Dimension.Length, "LENGTH", "Middle of the plan, north of the site [default: 0 m].");
     private readonly Option<bool> paper = new("--paper") { Description = "Dark on white, for printing." };
-    private readonly Option<int> afterglow = new("--afterglow") { Description = "Scans for which plots stay, fading.", HelpName = "SCANS", DefaultValueFactory = _ => new ViewOptions().AfterglowScans };
+    private readonly Option<int> afterglow = AfterglowOption();
     // No default of the option's own: the help would print all of the record's members.
     private readonly Option<PictureSize?> size;
     private readonly PictureSize defaultSize;
@@ -42,6 +42,9 @@ internal sealed class ViewArguments
 
         return arguments;
     }
+
+    public static Option<int> AfterglowOption() =>
+        new("--afterglow") { Description = "Scans for which plots stay, fading, from 1 to 1000.", HelpName = "SCANS", DefaultValueFactory = _ => new ViewOptions().AfterglowScans };
 
     public static Option<string[]> OverlayOption() =>
         new("--overlay") { Description = "Lines and places to draw under the plan, as GeoJSON; may be given again.", HelpName = "FILE.geojson", DefaultValueFactory = _ => [] };

@@ -27,13 +27,14 @@ internal static class ViewCommand
         var target = new Option<string?>("--target") { Description = "Target selected at first.", HelpName = "ID" };
         var unit = ChoiceOption.Create("--unit", "Unit of ranges.", ("km", RangeUnit.Kilometre), ("nmi", RangeUnit.NauticalMile));
         var paper = new Option<bool>("--paper") { Description = "Dark on white." };
+        var afterglow = ViewArguments.AfterglowOption();
         var overlays = ViewArguments.OverlayOption();
-        var size = new Option<(int Width, int Height)>("--size") { Description = "Size of the window in pixels at scale 1 [default: 1280x800].", HelpName = "WxH", CustomParser = ParseSize, DefaultValueFactory = _ => Usual };
+        var size = new Option<(int Width, int Height)?>("--size") { Description = "Size of the window in pixels at scale 1 [default: 1280x800].", HelpName = "WxH", CustomParser = ParseSize };
         var scale = Factor("--scale", "Draws everything so many times as large, from 1 to 8 [default: as the screen asks].", 1, 8);
         var measure = QuantityOption.Create("--measure", Dimension.Time, "TIME", "Plays for so long, prints how long the frames took, and closes.", 0, above: true);
         var command = new Command("view", "Replay a recording in a window, or two side by side. The key ? lists what keys and mouse do.")
         {
-            folder, other, at, speed, target, unit, paper, overlays, size, scale, measure,
+            folder, other, at, speed, target, unit, paper, afterglow, overlays, size, scale, measure,
         };
         command.SetAction(parsed =>
         {
@@ -45,11 +46,12 @@ internal static class ViewCommand
                 SpeedRatio = parsed.GetValue(speed) ?? 1,
                 Unit = parsed.GetValue(unit),
                 Theme = parsed.GetValue(paper) ? Theme.Paper : Theme.Dark,
+                AfterglowScans = parsed.GetValue(afterglow),
                 Selected = parsed.GetValue(target),
                 Overlays = [.. parsed.GetValue(overlays)!.Select(file => Overlay.Load(file, recordings[0].Scenario.Site))],
             };
             Check(settings, recordings, parsed.GetValue(measure));
-            Show(recordings, settings, parsed.GetValue(size), parsed.GetValue(scale), parsed.GetValue(measure), interruption.Token);
+            Show(recordings, settings, parsed.GetValue(size) ?? Usual, parsed.GetValue(scale), parsed.GetValue(measure), interruption.Token);
             return ExitCode.Done;
         });
         return (command, "scansim view out\nscansim view slow fast --at \"5 min\" --speed 4 --overlay coast.geojson");
@@ -61,6 +63,11 @@ internal static class ViewCommand
         if (settings.StartS > durationS)
         {
             throw new InputException(string.Create(CultureInfo.InvariantCulture, $"--at: read {settings.StartS:0.###} s, expected a time within the recording: 0 s to {durationS:0.###} s"));
+        }
+
+        if (settings.AfterglowScans is < 1 or > 1000)
+        {
+            throw new InputException($"--afterglow: read {settings.AfterglowScans}, expected a whole number from 1 to 1000");
         }
 
         if (settings.Selected is { } id && Array.TrueForAll(recordings, r => r.IndexOf(id) < 0))
@@ -114,7 +121,7 @@ internal static class ViewCommand
         },
     };
 
-    private static (int Width, int Height) ParseSize(ArgumentResult result)
+    private static (int Width, int Height)? ParseSize(ArgumentResult result)
     {
         var text = result.Tokens.Count > 0 ? result.Tokens[0].Value : "";
         var parts = text.Split('x');

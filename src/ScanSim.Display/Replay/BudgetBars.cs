@@ -5,8 +5,8 @@ using SkiaSharp;
 namespace ScanSim.Display.Replay;
 
 /// <summary>
-/// The budget of one look as bars in dB. Above, the three great terms on a scale of their own; below, what is left of them in free space,
-/// what beam and eclipsing take away, and the SNR that comes out, with the SNR that even odds need as a line.
+/// The budget of one look as bars in dB. Above, the three great terms on a scale of their own; below, what is left of them in free space for
+/// a dwell centred on the target, what beam and eclipsing take away, and the SNR that comes out, with the SNR that even odds need as a line.
 /// </summary>
 internal sealed class BudgetBars(Sheet sheet, LookExplanation look)
 {
@@ -27,9 +27,9 @@ internal sealed class BudgetBars(Sheet sheet, LookExplanation look)
         var (low, high) = Scale();
         column.Y += 3;
         var top = column.Y + 3;
-        Step(column, "free space", 0, look.FreeSpaceSnrDb, look.FreeSpaceSnrDb, sheet.Colours.Trail, low, high);
+        Step(column, "centred dwell", 0, look.FreeSpaceSnrDb, look.FreeSpaceSnrDb, sheet.Colours.Trail, low, high);
         var level = look.FreeSpaceSnrDb;
-        foreach (var (name, db) in ((string, double)[])[("azimuth beam", row.AzimuthBeamDb), ("elevation beam", row.ElevationBeamDb), ("eclipsing", row.EclipsingDb)])
+        foreach (var (name, db) in ((string, double)[])[("off azimuth", -look.LossDb(LookTerm.AzimuthBeam)), ("off elevation", -look.LossDb(LookTerm.ElevationBeam)), ("eclipsing", -look.LossDb(LookTerm.Eclipsing))])
         {
             Step(column, name, level, level + db, db, sheet.Colours.FalsePlot, low, high);
             level += db;
