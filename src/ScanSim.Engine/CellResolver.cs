@@ -89,7 +89,7 @@ internal sealed class CellResolver(RunSetup setup)
     /// <summary>Adds the members' echoes pulse by pulse, each with its phase, and draws the cell's statistic. Members come back strongest first.</summary>
     private void DrawTogether(FoundLook[] looks, Span<int> members, in Dwell dwell)
     {
-        members.Sort((a, b) => CompareStrength(looks, a, b));
+        SortByStrength(looks, members);
         var re = inPhase.AsSpan(0, dwell.Pulses);
         var im = quadrature.AsSpan(0, dwell.Pulses);
         re.Clear();
@@ -180,6 +180,23 @@ internal sealed class CellResolver(RunSetup setup)
 
         var label = string.Join('+', ids);
         return labels.TryGetValue(label, out var known) ? known : labels[label] = label;
+    }
+
+    /// <summary>Strongest first. By insertion: there are two or three, and a delegate for a library sort would be allocated each time.</summary>
+    private void SortByStrength(FoundLook[] looks, Span<int> members)
+    {
+        for (var i = 1; i < members.Length; i++)
+        {
+            var moved = members[i];
+            var place = i;
+            while (place > 0 && CompareStrength(looks, members[place - 1], moved) > 0)
+            {
+                members[place] = members[place - 1];
+                place--;
+            }
+
+            members[place] = moved;
+        }
     }
 
     private int CompareStrength(FoundLook[] looks, int a, int b)
