@@ -58,7 +58,7 @@ internal sealed class TargetGathering(Target target, double reachS, int scans)
             }
 
             marks.Add(looked ? looks[index] : new LookMark(t.TimeS, t.Scan, float.NaN, WithoutLook(t, recordingHasLooks)));
-            if (t.View == TargetView.InView || looked)
+            if (t.View == TargetView.InView)
             {
                 inView++;
                 withPlot += HasPlot(t.TimeS) ? 1 : 0;

@@ -1,4 +1,3 @@
-using System.Collections.Immutable;
 using SkiaSharp;
 
 namespace ScanSim.Display.Painting;
@@ -34,7 +33,7 @@ internal static class PlanView
         var plots = marks.PaintPlots();
         if (view.ShowLabels)
         {
-            PaintLabels(sheet, area, LabelsOf(sheet, area, targets, grid, furniture, plots, names));
+            PaintLabels(sheet, area, LabelsOf(sheet, area, targets, grid, furniture, plots, names.Select(name => name.Box)));
         }
 
         furniture.Paint();
@@ -42,12 +41,12 @@ internal static class PlanView
     }
 
     public static LabelLayout LabelsOf(
-        Sheet sheet, SKRect area, IReadOnlyList<TargetNow> targets, PlanGrid grid, PlanFurniture furniture, IEnumerable<SKPoint> plots, ImmutableArray<OverlayName> names)
+        Sheet sheet, SKRect area, IReadOnlyList<TargetNow> targets, PlanGrid grid, PlanFurniture furniture, IEnumerable<SKPoint> plots, IEnumerable<SKRect> taken)
     {
         var requests = targets
             .Select(t => new LabelRequest(t.Target.Id, t.Position, new SKSize(sheet.Width(t.Target.Id, TextStyle.Small) + 4, 14), !t.IsInView))
             .ToList();
-        List<SKRect> obstacles = [.. furniture.Boxes, .. grid.Labels.Select(l => l.Box), .. names.Select(n => n.Box), CountBox(area)];
+        List<SKRect> obstacles = [.. furniture.Boxes, .. grid.Labels.Select(l => l.Box), .. taken, CountBox(area)];
         var courses = targets.SelectMany(t => CourseMarks(t));
         return LabelPlacer.Place(requests, SKRect.Inflate(area, -4, -4), obstacles, plots.Concat(courses));
     }

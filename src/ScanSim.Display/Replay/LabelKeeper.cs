@@ -1,4 +1,3 @@
-using System.Collections.Immutable;
 using ScanSim.Display.Painting;
 using SkiaSharp;
 
@@ -18,12 +17,12 @@ internal sealed class LabelKeeper
     public int Layouts { get; private set; }
 
     public void Paint(
-        Sheet sheet, SKRect area, IReadOnlyList<TargetNow> targets, PlanGrid grid, PlanFurniture furniture, List<SKPoint> plots, PlanProjection plan, ImmutableArray<OverlayName> names)
+        Sheet sheet, SKRect area, IReadOnlyList<TargetNow> targets, PlanGrid grid, PlanFurniture furniture, List<SKPoint> plots, PlanProjection plan, IReadOnlyList<SKRect> taken)
     {
-        var key = (area, plan.CentreEastM, plan.CentreNorthM, plan.MetresPerPx, plan.UpRad, targets.Count, grid.Labels.Count, names.Length);
+        var key = (area, plan.CentreEastM, plan.CentreNorthM, plan.MetresPerPx, plan.UpRad, targets.Count, grid.Labels.Count, taken.Count);
         if (layout is null || !key.Equals(laidOutFor) || HasMoved(targets))
         {
-            layout = PlanView.LabelsOf(sheet, area, targets, grid, furniture, plots, names);
+            layout = PlanView.LabelsOf(sheet, area, targets, grid, furniture, plots, taken);
             laidOutFor = key;
             Layouts++;
             anchors.Clear();

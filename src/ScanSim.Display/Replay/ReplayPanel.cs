@@ -83,7 +83,7 @@ internal static class ReplayPanel
             var recording = world.Recordings[i];
             if (recording.IndexOf(id) is not (var index and >= 0))
             {
-                column.Heading(recording.Name);
+                column.Heading(world.NameOf(recording));
                 column.Paragraph($"It has no target {id}.", 1, sheet.Colours.Quiet);
                 continue;
             }
@@ -99,7 +99,7 @@ internal static class ReplayPanel
             if (world.IsComparison)
             {
                 column.Rule();
-                column.Heading(recording.Name, "seen in " + Seen(target));
+                column.Heading(world.NameOf(recording), "seen in " + Seen(target));
             }
 
             new TargetLookPanel(sheet, column, state, recording, target, string.Equals(looks.Id, id, StringComparison.Ordinal) ? looks : SelectedLooks.Nothing, i, world.IsComparison).Paint();

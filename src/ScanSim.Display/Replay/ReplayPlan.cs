@@ -47,7 +47,7 @@ internal sealed class ReplayPlan : IDisposable
         PaintSelection(sheet, targets, state);
         if (state.ShowLabels)
         {
-            labels.Paint(sheet, area, targets, grid, furniture, plots, projection, names);
+            labels.Paint(sheet, area, targets, grid, furniture, plots, projection, [.. names.Select(name => name.Box), .. CaptionBox(sheet, world, recording, area)]);
         }
 
         PaintCaption(sheet, world, recording, state.TimeS, area);
@@ -175,6 +175,19 @@ internal sealed class ReplayPlan : IDisposable
     }
 
     /// <summary>With two recordings side by side: which one this is.</summary>
+    /// <summary>Room for the caption of a comparison with the longest scan number, which labels keep clear of.</summary>
+    private static IEnumerable<SKRect> CaptionBox(Sheet sheet, ReplayWorld world, ReplayRecording recording, SKRect area)
+    {
+        if (world.IsComparison)
+        {
+            var width = Math.Min(area.Width - 110, sheet.Width(CaptionOf(world, recording, ", scan 000000"), TextStyle.Strong));
+            yield return new SKRect(area.Right - width - 20, area.Top + 8, area.Right - 8, area.Top + 28);
+        }
+    }
+
+    private static string CaptionOf(ReplayWorld world, ReplayRecording recording, string scan) =>
+        $"{world.NameOf(recording)}, {recording.Scene.Beam.PeriodS:0.0##} s a scan{scan}";
+
     private static void PaintCaption(Sheet sheet, ReplayWorld world, ReplayRecording recording, double timeS, SKRect area)
     {
         if (!world.IsComparison)
@@ -184,7 +197,7 @@ internal sealed class ReplayPlan : IDisposable
 
         var index = SidePanel.ScanIndexAt(recording.Scene, timeS);
         var scan = index < 0 ? "" : $", scan {recording.Scene.Scans[index].Scan}";
-        var text = sheet.Fit($"{recording.Name}, {recording.Scene.Beam.PeriodS:0.0##} s a scan{scan}", TextStyle.Strong, area.Width - 110);
+        var text = sheet.Fit(CaptionOf(world, recording, scan), TextStyle.Strong, area.Width - 110);
         var width = sheet.Width(text, TextStyle.Strong);
         sheet.Rect(new SKRect(area.Right - width - 20, area.Top + 8, area.Right - 8, area.Top + 28), sheet.Colours.Panel.WithAlpha(0xE0));
         sheet.Text(text, area.Right - 14, area.Top + 22, TextStyle.Strong, sheet.Colours.Ink, SKTextAlign.Right);

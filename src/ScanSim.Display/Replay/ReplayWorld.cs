@@ -26,5 +26,12 @@ internal sealed record ReplayWorld
     /// <summary>The range that both plans show unless zoomed.</summary>
     public double WholeRangeM => Recordings.Max(recording => recording.Scene.InstrumentedRangeM);
 
+    /// <summary>The folder's name; with the side it is shown on when both folders have the same.</summary>
+    public string NameOf(ReplayRecording recording)
+    {
+        var alike = IsComparison && string.Equals(Recordings[0].Name, Recordings[1].Name, StringComparison.Ordinal);
+        return alike ? $"{recording.Name} ({(ReferenceEquals(recording, First) ? "left" : "right")})" : recording.Name;
+    }
+
     public double RangeM(ReplayState state) => state.RangeM ?? WholeRangeM;
 }
