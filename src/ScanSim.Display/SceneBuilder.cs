@@ -23,15 +23,10 @@ public sealed class SceneBuilder : IRecordingSink
     internal SceneBuilder(Scenario scenario, int scans)
     {
         this.scenario = scenario;
-        var beamRadPerS = scenario.Radar.Scan switch
-        {
-            Scan.Rotation rotation => 2 * Math.PI / rotation.PeriodS,
-            Scan.Sector sector => sector.RateRadPerS,
-            _ => throw new InvalidOperationException("unknown kind of scan"),
-        };
+        var reachS = 0.5 * scenario.Radar.Plots.MaximumWidthRad / scenario.Radar.Scan.BeamSpeedRadPerS;
         foreach (var target in scenario.Targets)
         {
-            gatherings.Add(target.Id, new TargetGathering(target, 0.5 * scenario.Radar.Plots.MaximumWidthRad / beamRadPerS, scans));
+            gatherings.Add(target.Id, new TargetGathering(target, reachS, scans));
         }
     }
 

@@ -1,30 +1,13 @@
-using System.Runtime.InteropServices;
 using System.Text.Json;
 using CsvHelper;
 using Parquet;
-using Parquet.Schema;
 
 namespace ScanSim.Recordings.Columns;
 
 /// <summary>Yes or no: "true" and "false" in texts, one byte 1 or 0 in digests.</summary>
-internal sealed class FlagValues(Column column) : ColumnValues<bool>(column)
+internal sealed class FlagValues(Column column) : PlainValues<bool>(column)
 {
-    public override DataField Field => new DataField<bool>(Column.Name, nullable: false);
-
     public override EncodingHint Encoding => EncodingHint.Default;
-
-    public override void Check(string table, long firstRow)
-    {
-        // Every value of the type can be stored.
-    }
-
-    public override void AppendTo(ColumnDigest digest) => digest.Append(MemoryMarshal.AsBytes(Values));
-
-    public override Task WriteAsync(ParquetRowGroupWriter group, DataField field) => group.WriteAsync(field, Memory);
-
-    public override ValueTask ReadAsync(ParquetRowGroupReader group, DataField field, int rows) => group.ReadAsync(field, Renew(rows));
-
-    public override void WriteCsv(CsvWriter writer, int row) => writer.WriteField(this[row]);
 
     public override void ReadCsv(CsvReader reader)
     {

@@ -1,31 +1,14 @@
 using System.Globalization;
-using System.Runtime.InteropServices;
 using System.Text.Json;
 using CsvHelper;
 using Parquet;
-using Parquet.Schema;
 
 namespace ScanSim.Recordings.Columns;
 
 /// <summary>Whole numbers of 64 bits.</summary>
-internal sealed class LongCountValues(Column column) : ColumnValues<long>(column)
+internal sealed class LongCountValues(Column column) : PlainValues<long>(column)
 {
-    public override DataField Field => new DataField<long>(Column.Name, nullable: false);
-
     public override EncodingHint Encoding => EncodingHint.DeltaBinaryPacked;
-
-    public override void Check(string table, long firstRow)
-    {
-        // Every value of the type can be stored.
-    }
-
-    public override void AppendTo(ColumnDigest digest) => digest.Append(MemoryMarshal.AsBytes(Values));
-
-    public override Task WriteAsync(ParquetRowGroupWriter group, DataField field) => group.WriteAsync(field, Memory);
-
-    public override ValueTask ReadAsync(ParquetRowGroupReader group, DataField field, int rows) => group.ReadAsync(field, Renew(rows));
-
-    public override void WriteCsv(CsvWriter writer, int row) => writer.WriteField(this[row]);
 
     public override void ReadCsv(CsvReader reader)
     {
