@@ -1,6 +1,7 @@
 using System.Collections.Immutable;
 using System.Globalization;
 using ScanSim.Display;
+using ScanSim.Display.Painting;
 using ScanSim.Display.Explaining;
 using ScanSim.Scenarios;
 
@@ -54,7 +55,7 @@ internal static class ExplainReport
         foreach (var look in looks)
         {
             output.WriteLine(Line(
-                $"{look.Row.Pulses} pulses, Pfa {scenario.Radar.Processing.FalseAlarmProbability:0.##E+0}: needs {look.NeededDb:0.00} dB per pulse for Pd 0.5, {look.NeededForWantedDb:0.00} dB for Pd {look.WantedPd:0.####}; in free space, with the dwell centred on it, out to {RangeWords.Of(look.EvenOddsRangeM, unit)} and {RangeWords.Of(look.WantedRangeM, unit)}"));
+                $"{look.Row.Pulses} pulses, Pfa {scenario.Radar.Processing.FalseAlarmProbability:0.##E+0}: needs {look.NeededDb:0.00} dB per pulse for Pd 0.5, {look.NeededForWantedDb:0.00} dB for Pd {look.WantedPd:0.####}; in free space, with the dwell centred on it, out to {RangeText.Precise(look.EvenOddsRangeM, unit)} and {RangeText.Precise(look.WantedRangeM, unit)}"));
         }
 
         var inView = story.Passes.Count(p => p.InView);
@@ -116,8 +117,8 @@ internal static class ExplainReport
                 Line($"{s.Length}"),
                 Line($"{s[0].TimeS:0.0} s"),
                 Line($"{s[^1].TimeS:0.0} s"),
-                RangeWords.Of(s[0].Truth!.Value.RangeM, unit),
-                RangeWords.Of(s[^1].Truth!.Value.RangeM, unit),
+                RangeText.Precise(s[0].Truth!.Value.RangeM, unit),
+                RangeText.Precise(s[^1].Truth!.Value.RangeM, unit),
                 Words(s.GroupBy(p => p.Outcome).MaxBy(g => g.Count())!.Key),
             }));
     }

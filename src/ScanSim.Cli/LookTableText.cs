@@ -1,5 +1,6 @@
 using System.Globalization;
 using ScanSim.Display;
+using ScanSim.Display.Painting;
 using ScanSim.Display.Explaining;
 
 namespace ScanSim.Cli;
@@ -55,7 +56,7 @@ internal static class LookTableText
         [
             Line($"{row.TimeS:0.00} s"),
             Line($"{row.Scan}"),
-            RangeWords.Of(row.RangeM, unit),
+            RangeText.Precise(row.RangeM, unit),
             Line($"{row.AzimuthDeg:000.0}°"),
             Line($"{row.ElevationDeg:0.0}°"),
             Db(row.RadarDb),
@@ -82,7 +83,7 @@ internal static class LookTableText
         [
             Line($"{first.TimeS:0.00} s"),
             last.Scan > first.Scan ? Line($"{first.Scan}–{last.Scan}") : Line($"{first.Scan}"),
-            RangeWords.Of(truth.RangeM, unit),
+            RangeText.Precise(truth.RangeM, unit),
             Line($"{truth.AzimuthDeg:000.0}°"),
             Line($"{truth.ElevationDeg:0.0}°"),
             .. Enumerable.Repeat("", Columns.Length - 6),

@@ -1,5 +1,6 @@
 using System.Globalization;
 using ScanSim.Display;
+using ScanSim.Display.Painting;
 using ScanSim.Engine;
 using ScanSim.Scenarios;
 
@@ -28,7 +29,7 @@ internal static class RunSummary
         tally.Id,
         target.Class,
         tally.FirstPlotS is { } firstS ? Line($"{firstS:0.0} s") : Never,
-        tally.FirstPlotRangeM is { } rangeM ? RangeWords.Of(rangeM, unit) : Never,
+        tally.FirstPlotRangeM is { } rangeM ? RangeText.Precise(rangeM, unit) : Never,
         Line($"{tally.ScansInView} of {tally.ScansAlive}"),
         Line($"{tally.ScansWithPlot}"),
         tally.BlipScanRatio is { } ratio ? Line($"{100 * ratio:0} %") : Never,

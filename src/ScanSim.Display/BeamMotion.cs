@@ -6,12 +6,7 @@ namespace ScanSim.Display;
 public sealed class BeamMotion(Scan scan)
 {
     /// <summary>From the start of one scan to the start of the next.</summary>
-    public double PeriodS => scan switch
-    {
-        Scan.Rotation rotation => rotation.PeriodS,
-        Scan.Sector sector => SweepS(sector) + sector.TurnaroundS,
-        _ => throw new InvalidOperationException($"unknown kind of scan {scan.GetType().Name}"),
-    };
+    public double PeriodS => scan.ScanS;
 
     /// <summary>The swept sector; null for full turns.</summary>
     public AzimuthSector? Limits => (scan as Scan.Sector)?.Limits;
@@ -30,6 +25,4 @@ public sealed class BeamMotion(Scan scan)
         var offsetRad = (long)index % 2 == 0 ? sweptRad : sector.Limits.WidthRad - sweptRad;
         return (sector.Limits.FromRad + offsetRad) % Math.Tau;
     }
-
-    private static double SweepS(Scan.Sector sector) => sector.Limits.WidthRad / sector.RateRadPerS;
 }

@@ -16,26 +16,11 @@ public static class Picture
     {
         var draw = FormatOf(path);
         size.Check();
-        var unfinished = path + ".part";
-        try
+        FileBeside.Write(path, "Picture", unfinished =>
         {
-            using (var stream = File.Create(unfinished))
-            {
-                draw(scene, size, stream, paint);
-            }
-
-            File.Move(unfinished, path, overwrite: true);
-        }
-        catch (Exception fault) when (fault is IOException or UnauthorizedAccessException)
-        {
-            Discard(unfinished);
-            throw new PictureException($"Picture '{path}' could not be written: {fault.Message}", fault);
-        }
-        catch
-        {
-            Discard(unfinished);
-            throw;
-        }
+            using var stream = File.Create(unfinished);
+            draw(scene, size, stream, paint);
+        });
     }
 
     private static Action<Scene, PictureSize, Stream, Action<SKCanvas, bool>> FormatOf(string path) =>
@@ -92,17 +77,5 @@ public static class Picture
         paint(canvas, false);
         document.EndPage();
         document.Close();
-    }
-
-    private static void Discard(string path)
-    {
-        try
-        {
-            File.Delete(path);
-        }
-        catch (Exception fault) when (fault is IOException or UnauthorizedAccessException)
-        {
-            // The first fault is the one to report.
-        }
     }
 }

@@ -23,10 +23,9 @@ public sealed class SceneBuilder : IRecordingSink
     internal SceneBuilder(Scenario scenario, int scans)
     {
         this.scenario = scenario;
-        var reachS = 0.5 * scenario.Radar.Plots.MaximumWidthRad / scenario.Radar.Scan.BeamSpeedRadPerS;
         foreach (var target in scenario.Targets)
         {
-            gatherings.Add(target.Id, new TargetGathering(target, reachS, scans));
+            gatherings.Add(target.Id, new TargetGathering(target, scenario.Radar.PlotReachS, scans));
         }
     }
 

@@ -28,7 +28,7 @@ public sealed class LookModel
     {
         var radar = scenario.Radar;
         patterns = new AntennaPatterns(radar.Antenna);
-        earth = new EffectiveEarth(scenario.Environment.EffectiveEarthFactor * EarthRadius.GaussianMeanM(scenario.Site.LatitudeRad));
+        earth = scenario.EffectiveEarth();
         antennaAltitudeM = scenario.Site.AntennaAltitudeM;
         horizonM = earth.HorizonDistanceM(Math.Max(0, antennaAltitudeM));
         pulseWidthS = radar.Waveform.PulseWidthS;

@@ -19,12 +19,7 @@ public static class RunLimits
     public static string? Broken(Scenario scenario)
     {
         var radar = scenario.Radar;
-        var scanS = radar.Scan switch
-        {
-            Scan.Rotation rotation => rotation.PeriodS,
-            Scan.Sector sector => sector.Limits.WidthRad / sector.RateRadPerS + sector.TurnaroundS,
-            _ => throw new InvalidOperationException("unknown kind of scan"),
-        };
+        var scanS = radar.Scan.ScanS;
         var scans = scenario.Run.DurationS / scanS;
         if (scans > MostScans || scenario.Run.DurationS * DwellGrid.PicosecondsPerSecond > long.MaxValue / 2)
         {

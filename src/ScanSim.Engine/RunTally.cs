@@ -17,9 +17,8 @@ public sealed class RunTally : IRecordingSink
     public RunTally(Scenario scenario, IRecordingSink next)
     {
         this.next = next;
-        var reachS = 0.5 * scenario.Radar.Plots.MaximumWidthRad / ScanTimeline.Of(scenario).BeamSpeedRadPerS;
         ids = [.. scenario.Targets.Select(t => t.Id)];
-        targets = ids.ToDictionary(id => id, id => new TargetTally(id, reachS), StringComparer.Ordinal);
+        targets = ids.ToDictionary(id => id, id => new TargetTally(id, scenario.Radar.PlotReachS), StringComparer.Ordinal);
     }
 
     public int Scans { get; private set; }

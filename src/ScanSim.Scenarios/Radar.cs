@@ -48,6 +48,9 @@ public sealed record Radar
         EnergyGainRatio = Waveform.PulseWidthS / Waveform.CompressedWidthS,
     };
 
+    /// <summary>Time the beam takes over half the widest plot: a plot belongs to the pass over its target that is no further away in time.</summary>
+    public double PlotReachS => 0.5 * Plots.MaximumWidthRad / Scan.BeamSpeedRadPerS;
+
     /// <summary>Pulses of a dwell at one of the PRFs: the number given, or those within one half-power beamwidth, rounded, at least 1.</summary>
     public int PulsesPerDwell(double prfHz) =>
         Processing.PulsesPerDwell ?? Math.Max(1, (int)Math.Round(BeamwidthPulses.Count(Antenna.Azimuth.BeamwidthRad, prfHz, Scan.BeamSpeedRadPerS)));

@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using ScanSim.Physics.Earth;
 
 namespace ScanSim.Scenarios;
 
@@ -25,4 +26,7 @@ public sealed record Scenario
 
     /// <summary>The file's own text (UTF-8), kept for the recording's scenario.json.</summary>
     public required string SourceText { get; init; }
+
+    /// <summary>The sphere of k times the earth's mean radius at the site, on which rays run straight.</summary>
+    public EffectiveEarth EffectiveEarth() => new(Environment.EffectiveEarthFactor * EarthRadius.GaussianMeanM(Site.LatitudeRad));
 }

@@ -1,3 +1,4 @@
+using ScanSim.Display.Painting;
 using ScanSim.Physics;
 using ScanSim.Physics.Earth;
 using ScanSim.Physics.Waveforms;
@@ -26,7 +27,7 @@ internal sealed class NoLookReasons(Scenario scenario, RangeUnit unit)
 
     private string Horizon(in TruthRow row)
     {
-        var earth = new EffectiveEarth(scenario.Environment.EffectiveEarthFactor * EarthRadius.GaussianMeanM(scenario.Site.LatitudeRad));
+        var earth = scenario.EffectiveEarth();
         var antennaM = scenario.Site.AntennaAltitudeM;
         var groundM = Math.Sqrt(row.EastM * row.EastM + row.NorthM * row.NorthM);
         var seenM = earth.HorizonDistanceM(antennaM) + earth.HorizonDistanceM(row.HeightM);
@@ -79,7 +80,7 @@ internal sealed class NoLookReasons(Scenario scenario, RangeUnit unit)
             : (PassOutcome.NoDwell, $"no look: {snrDb:0.0} dB per pulse at the beam's peak, but no dwell of this scan met it there");
     }
 
-    private string Range(double rangeM) => unit == RangeUnit.NauticalMile ? $"{rangeM / 1852:0.00} nmi" : $"{rangeM / 1000:0.00} km";
+    private string Range(double rangeM) => RangeText.Precise(rangeM, unit);
 
     private static string Sector(AzimuthSector sector) => $"{sector.FromRad * DegPerRad:000}° to {sector.ToRad * DegPerRad:000}°";
 }

@@ -8,7 +8,7 @@ namespace ScanSim.Display.Explaining;
 public sealed class TargetStoryReader(Recording recording, Scenario scenario, LookExplainer explainer)
 {
     /// <summary>A plot belongs to the pass that is no further away in time than half the widest plot, as runs count it.</summary>
-    private readonly double reachS = 0.5 * scenario.Radar.Plots.MaximumWidthRad / scenario.Radar.Scan.BeamSpeedRadPerS;
+    private readonly double reachS = scenario.Radar.PlotReachS;
 
     /// <summary>The scans of a span of time; a scan that is cut by its ends is told as far as it lies within.</summary>
     public TargetStory Read(Target target, double fromS, double toS) => Read(target, fromS, toS, scan: null);

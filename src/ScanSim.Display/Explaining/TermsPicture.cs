@@ -22,7 +22,7 @@ public static class TermsPicture
             $"There is no look at '{story.Target.Id}' from {story.FromS:0.0} s to {story.ToS:0.0} s, so there are no terms to draw: choose another span of time.");
         var title = $"{scenarioName}: why {story.Target.Id} was seen or missed";
         var svg = Draw(sheet => new TermsChart(sheet, story, data, startUtc, unit).Paint(title, Size));
-        Write(path, SvgEnvelope.Finish(svg, title, Size));
+        FileBeside.Write(path, "Picture", unfinished => File.WriteAllText(unfinished, SvgEnvelope.Finish(svg, title, Size)));
     }
 
     private static string Draw(Action<Sheet> paint)
@@ -35,20 +35,5 @@ public static class TermsPicture
         }
 
         return Encoding.UTF8.GetString(drawn.ToArray());
-    }
-
-    private static void Write(string path, string text)
-    {
-        var unfinished = path + ".part";
-        try
-        {
-            File.WriteAllText(unfinished, text);
-            File.Move(unfinished, path, overwrite: true);
-        }
-        catch (Exception fault) when (fault is IOException or UnauthorizedAccessException)
-        {
-            File.Delete(unfinished);
-            throw new PictureException($"Picture '{path}' could not be written: {fault.Message}", fault);
-        }
     }
 }

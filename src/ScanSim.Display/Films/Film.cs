@@ -15,31 +15,11 @@ public static class Film
         Check(plan, scene.DurationS, path);
         view.Check();
         var write = FormatOf(path);
-        var unfinished = path + ".part";
-        var begun = false;
-        try
+        FileBeside.Write(path, "Film", unfinished =>
         {
-            using (File.Create(unfinished))
-            {
-                begun = true;
-            }
-
             write(new FilmJob(scene, view, plan, unfinished, progress, cancellation));
             cancellation.ThrowIfCancellationRequested();
-            File.Move(unfinished, path, overwrite: true);
-            begun = false;
-        }
-        catch (Exception fault) when (fault is IOException or UnauthorizedAccessException)
-        {
-            throw new PictureException($"Film '{path}' could not be written: {fault.Message}", fault);
-        }
-        finally
-        {
-            if (begun)
-            {
-                Discard(unfinished);
-            }
-        }
+        });
     }
 
     /// <summary>Throws <see cref="PictureException"/> for what can be known to go wrong before the recording is read.</summary>
@@ -94,16 +74,4 @@ public static class Film
 
     private static string FfmpegProgram() => Ffmpeg.Find() ?? throw new PictureException(
         $"MP4 films need the program ffmpeg, which is not on the PATH. {Ffmpeg.HowToInstall} Or ask for a .webp or .gif, which need nothing.");
-
-    private static void Discard(string path)
-    {
-        try
-        {
-            File.Delete(path);
-        }
-        catch (Exception fault) when (fault is IOException or UnauthorizedAccessException)
-        {
-            // The first fault is the one to report.
-        }
-    }
 }

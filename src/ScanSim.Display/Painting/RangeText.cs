@@ -1,7 +1,7 @@
 namespace ScanSim.Display.Painting;
 
 /// <summary>Ranges in the unit asked for.</summary>
-internal static class RangeText
+public static class RangeText
 {
     public static double MetresPerUnit(RangeUnit unit) => unit == RangeUnit.NauticalMile ? 1852 : 1000;
 
